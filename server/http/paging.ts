@@ -1,4 +1,4 @@
-import { AppError } from "#server/http/errors.ts";
+import { AppError } from "./errors.ts";
 
 /** How many items one page of a list holds. */
 export const pageSize = 20;

@@ -1,0 +1,85 @@
+import { existsSync } from "node:fs";
+import compression from "compression";
+import { eq } from "drizzle-orm";
+import express, { type Express } from "express";
+import type { Logger } from "pino";
+import type { Config } from "./config/environment.ts";
+import type { Database } from "./db/client.ts";
+import { siteVersion } from "./db/schema/audit.ts";
+import type { ClientBuild } from "./http/client-build.ts";
+import { apiRouter, inProcessCaller, type Route } from "./http/endpoints.ts";
+import { AppError, handleErrors } from "./http/errors.ts";
+import { createPageCache, noPageCache } from "./http/page-cache.ts";
+import { pages } from "./http/pages.ts";
+import { securityHeaders } from "./http/security-headers.ts";
+import { createQueue } from "./jobs/queue.ts";
+
+interface AppParts {
+  config: Config;
+  database: Database;
+  log: Logger;
+  clock: () => number;
+  /** Draws pages; without it the application is the API alone, which most tests want. */
+  client?: ClientBuild;
+}
+
+export type App = Awaited<ReturnType<typeof createApp>>;
+
+/** Wires everything without listening: features meet here and nowhere else. */
+export async function createApp({ config, database, log, clock, client }: AppParts) {
+  const queue = createQueue({ database, log, clock });
+  const routes: Route[] = [];
+
+  const app = express();
+  app.disable("x-powered-by");
+  app.set("trust proxy", config.TRUSTED_PROXIES);
+  app.use(
+    securityHeaders({
+      https: config.SITE_URL.startsWith("https:"),
+      development: config.NODE_ENV === "development",
+    }),
+  );
+  app.use(compression());
+  serveStaticFiles(app);
+  app.use((req, _res, next) => {
+    req.viewer = null;
+    next();
+  });
+  app.use(apiRouter(routes));
+  app.use("/api", () => {
+    throw new AppError("not_found", "There is no such route.");
+  });
+  if (client) {
+    const cache =
+      config.NODE_ENV === "development"
+        ? noPageCache
+        : createPageCache(() => readSiteVersion(database), clock);
+    const call = inProcessCaller(routes);
+    app.get("/{*path}", pages({ client, call, cache, siteUrl: config.SITE_URL, fakes: config.FAKES, log }));
+  }
+  app.use(handleErrors(log));
+
+  return {
+    app,
+    routes,
+    queue,
+    async start() {
+      queue.start();
+    },
+    async stop() {
+      await queue.stop();
+    },
+  };
+}
+
+/** Built files carry a hash of their content in their name; those of public/ do not. */
+function serveStaticFiles(app: Express): void {
+  const assets = "dist/client/assets";
+  if (existsSync(assets))
+    app.use("/assets", express.static(assets, { immutable: true, maxAge: "1y", index: false }));
+  app.use(express.static("public", { maxAge: "1h", index: false }));
+}
+
+function readSiteVersion(database: Database): number {
+  return database.select().from(siteVersion).where(eq(siteVersion.id, 1)).get()?.value ?? 0;
+}

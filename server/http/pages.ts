@@ -1,0 +1,97 @@
+import type { Request, RequestHandler, Response } from "express";
+import type { Logger } from "pino";
+import type { PageSettings, Transport } from "#shared/contracts/rendering.ts";
+import type { ClientBuild } from "./client-build.ts";
+import type { InProcessCall } from "./endpoints.ts";
+import { toErrorResponse } from "./errors.ts";
+import { type PageCache, pageCacheKey } from "./page-cache.ts";
+import type { Viewer } from "./viewer.ts";
+
+const noncePlaceholder = "__CSP_NONCE__";
+
+interface PageOptions {
+  client: ClientBuild;
+  call: InProcessCall;
+  cache: PageCache;
+  siteUrl: string;
+  fakes: boolean;
+  log: Logger;
+}
+
+/** A page ready to send but for its nonce. */
+export interface FinishedPage {
+  status: number;
+  html: string;
+}
+
+/** Draws every address that no other route has taken. */
+export function pages(options: PageOptions): RequestHandler {
+  return async (req, res) => {
+    const settings = pageSettings(req, options);
+    const key = req.viewer ? null : pageCacheKey(req.originalUrl, settings);
+    const version = options.cache.version();
+    const kept = key ? options.cache.get(key) : undefined;
+    const page = kept ?? (await draw(req, res, settings, options));
+    if (!page) return;
+    if (key && !kept && page.status === 200) options.cache.set(key, page, version);
+    send(res, page, req.viewer);
+  };
+}
+
+function pageSettings(req: Request, { siteUrl, fakes }: PageOptions): PageSettings {
+  const cookies = req.headers.cookie ?? "";
+  const scheme = /(?:^|; )scheme=(light|dark)/.exec(cookies)?.[1] as "light" | "dark" | undefined;
+  const units = /(?:^|; )units=inch/.test(cookies) ? "inch" : "mm";
+  return { siteUrl, scheme: scheme ?? "system", units, fakes };
+}
+
+/** Renders the page; answers the request itself, and returns null, when it is a redirect. */
+async function draw(
+  req: Request,
+  res: Response,
+  settings: PageSettings,
+  options: PageOptions,
+): Promise<FinishedPage | null> {
+  const { render } = await options.client.renderer();
+  const transport: Transport = async (name, call) => {
+    try {
+      return { status: 200, body: await options.call(name, call, { viewer: req.viewer, http: null }) };
+    } catch (thrown) {
+      return toErrorResponse(thrown, options.log);
+    }
+  };
+  const request = new Request(new URL(req.originalUrl, options.siteUrl));
+  const page = await render(request, transport, settings);
+  if (page.kind === "redirect") {
+    res.redirect(page.status, page.location);
+    return null;
+  }
+  const template = await options.client.template(req.originalUrl);
+  return { status: page.status, html: fill(template, page, settings, options.client) };
+}
+
+/** Puts the drawn page into the template. Function replacers, as a `$` in the text means nothing then. */
+function fill(
+  template: string,
+  page: { head: string; body: string; state: unknown; modules: string[] },
+  settings: PageSettings,
+  client: ClientBuild,
+): string {
+  const state = JSON.stringify(page.state).replaceAll("<", "\\u003c");
+  const preloads = client
+    .scriptsOf(page.modules)
+    .map((href) => `<link rel="modulepreload" href="${href}" nonce="${noncePlaceholder}">`)
+    .join("");
+  return template
+    .replace("__SCHEME__", settings.scheme)
+    .replace("<!--head-->", () => page.head + preloads)
+    .replace("<!--app-->", () => page.body)
+    .replace("<!--state-->", () => state);
+}
+
+function send(res: Response, page: FinishedPage, viewer: Viewer): void {
+  res.status(page.status);
+  res.set("Content-Type", "text/html; charset=utf-8");
+  res.set("Cache-Control", viewer ? "private, no-store" : "private, no-cache");
+  res.end(page.html.replaceAll(noncePlaceholder, res.locals.nonce));
+}

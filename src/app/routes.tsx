@@ -1,0 +1,28 @@
+import type { RouteObject } from "react-router";
+import { meQuery } from "#src/lib/viewer.ts";
+import { ErrorPage } from "./error-page.tsx";
+import { Layout } from "./layout.tsx";
+import { type LoadContext, page } from "./page.tsx";
+
+/** The whole map of the site. */
+export function routes(context: LoadContext): RouteObject[] {
+  return [
+    {
+      id: "root",
+      Component: Layout,
+      loader: async () => {
+        await context.queryClient.ensureQueryData(meQuery(context.api));
+        return null;
+      },
+      shouldRevalidate: () => false,
+      // The error page of a page below keeps the header; that of the root stands alone.
+      errorElement: <ErrorPage />,
+      children: [
+        {
+          errorElement: <ErrorPage />,
+          children: [page(context, "/", "home"), page(context, "*", "not-found")],
+        },
+      ],
+    },
+  ];
+}

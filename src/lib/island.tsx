@@ -1,0 +1,63 @@
+import { type ComponentType, lazy, Suspense, useId, useState } from "react";
+
+/** Where an island's code comes from: a dynamic import, and what it brought once it has come. */
+export interface IslandSource<Props> {
+  load: () => Promise<ComponentType<Props>>;
+  loaded: ComponentType<Props> | null;
+}
+
+const waiting: (() => Promise<void>)[] = [];
+
+/** Declares an island beside the dynamic import of its component. */
+export function islandSource<Props>(load: () => Promise<ComponentType<Props>>): IslandSource<Props> {
+  const source: IslandSource<Props> = { load, loaded: null };
+  waiting.push(async () => {
+    source.loaded = await load();
+  });
+  return source;
+}
+
+/** Fetches the code of every island: the server does this once, so that it can draw them whole. */
+export async function loadIslands(): Promise<void> {
+  await Promise.all(waiting.splice(0).map((load) => load()));
+}
+
+/** Resolves once the element is on the screen or nearly so; at once when there is nothing to watch. */
+function nearScreen(elementId: string): Promise<void> {
+  const element = document.getElementById(elementId);
+  if (!element) return Promise.resolve();
+  return new Promise((resolve) => {
+    const observer = new IntersectionObserver(
+      (entries) => {
+        if (!entries.some((entry) => entry.isIntersecting)) return;
+        observer.disconnect();
+        resolve();
+      },
+      { rootMargin: "200px" },
+    );
+    observer.observe(element);
+  });
+}
+
+interface IslandProps<Props> {
+  source: IslandSource<Props>;
+  props: Props;
+}
+
+/**
+ * A part of a page that is drawn on the server and comes alive in the browser only when it nears the
+ * screen: its code is no part of the page's first load.
+ */
+export function Island<Props extends object>({ source, props }: IslandProps<Props>) {
+  const id = useId();
+  const [Part] = useState<ComponentType<Props>>(
+    () => source.loaded ?? lazy(() => nearScreen(id).then(async () => ({ default: await source.load() }))),
+  );
+  return (
+    <div id={id}>
+      <Suspense fallback={null}>
+        <Part {...props} />
+      </Suspense>
+    </div>
+  );
+}
