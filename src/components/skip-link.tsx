@@ -1,0 +1,12 @@
+/** First in the tab order of every page; `main` carries the id. */
+export function SkipLink({ target = "content" }: { target?: string }) {
+  return (
+    <a
+      href={`#${target}`}
+      data-chrome
+      className="fixed top-2 left-2 z-50 -translate-y-20 rounded bg-paper-raised px-4 py-3 font-semibold shadow-lifted focus:translate-y-0"
+    >
+      Skip to the content
+    </a>
+  );
+}
