@@ -1,5 +1,10 @@
 import type { PageSettings } from "#shared/contracts/rendering.ts";
-import type { FinishedPage } from "./pages.ts";
+
+/** A page ready to send but for its nonce. */
+export interface FinishedPage {
+  status: number;
+  html: string;
+}
 
 /** Finished pages for signed-out readers, good until anything public changes. */
 export interface PageCache {

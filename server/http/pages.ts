@@ -4,7 +4,8 @@ import type { PageSettings, Transport } from "#shared/contracts/rendering.ts";
 import type { ClientBuild } from "./client-build.ts";
 import type { InProcessCall } from "./endpoints.ts";
 import { toErrorResponse } from "./errors.ts";
-import { type PageCache, pageCacheKey } from "./page-cache.ts";
+import { faultPage } from "./fault-page.ts";
+import { type FinishedPage, type PageCache, pageCacheKey } from "./page-cache.ts";
 import type { Viewer } from "./viewer.ts";
 
 const noncePlaceholder = "__CSP_NONCE__";
@@ -18,12 +19,6 @@ interface PageOptions {
   log: Logger;
 }
 
-/** A page ready to send but for its nonce. */
-export interface FinishedPage {
-  status: number;
-  html: string;
-}
-
 /** Draws every address that no other route has taken. */
 export function pages(options: PageOptions): RequestHandler {
   return async (req, res) => {
@@ -31,7 +26,7 @@ export function pages(options: PageOptions): RequestHandler {
     const key = req.viewer ? null : pageCacheKey(req.originalUrl, settings);
     const version = options.cache.version();
     const kept = key ? options.cache.get(key) : undefined;
-    const page = kept ?? (await draw(req, res, settings, options));
+    const page = kept ?? (await drawOrTell(req, res, settings, options));
     if (!page) return;
     if (key && !kept && page.status === 200) options.cache.set(key, page, version);
     send(res, page, req.viewer);
@@ -43,6 +38,21 @@ function pageSettings(req: Request, { siteUrl, fakes }: PageOptions): PageSettin
   const scheme = /(?:^|; )scheme=(light|dark)/.exec(cookies)?.[1] as "light" | "dark" | undefined;
   const units = /(?:^|; )units=inch/.test(cookies) ? "inch" : "mm";
   return { siteUrl, scheme: scheme ?? "system", units, fakes };
+}
+
+/** A fault while drawing is logged, and told in plain HTML that needs nothing else to work. */
+async function drawOrTell(
+  req: Request,
+  res: Response,
+  settings: PageSettings,
+  options: PageOptions,
+): Promise<FinishedPage | null> {
+  try {
+    return await draw(req, res, settings, options);
+  } catch (thrown) {
+    const { status, body } = toErrorResponse(thrown, options.log);
+    return { status, html: faultPage(body.error.message, body.error.id) };
+  }
 }
 
 /** Renders the page; answers the request itself, and returns null, when it is a redirect. */
