@@ -1,0 +1,79 @@
+import { z } from "zod";
+import { countInput, numberInput } from "../inputs.ts";
+
+/** Inputs of `saddle-cope`: lengths in mm, angle in degrees. */
+export const saddleCopeInputs = z.strictObject({
+  headerOd: numberInput({
+    label: "Header outside diameter",
+    unit: "mm",
+    help: "The tube that stays whole.",
+    min: 3,
+    max: 2000,
+    step: 0.1,
+    decimals: 2,
+  }),
+  branchOd: numberInput({
+    label: "Branch outside diameter",
+    unit: "mm",
+    help: "The tube whose end is cut.",
+    min: 3,
+    max: 2000,
+    step: 0.1,
+    decimals: 2,
+  }),
+  branchWall: numberInput({
+    label: "Branch wall",
+    unit: "mm",
+    help: "Wall thickness of the tube whose end is cut.",
+    min: 0.2,
+    max: 200,
+    step: 0.1,
+    decimals: 2,
+  }),
+  angle: numberInput({
+    label: "Angle between the axes",
+    unit: "°",
+    help: "90 is square. The heel is on the acute side.",
+    min: 15,
+    max: 90,
+    step: 0.5,
+    decimals: 2,
+  }),
+  offset: numberInput({
+    label: "Offset",
+    unit: "mm",
+    help: "How far the branch axis passes clear of the header axis. Positive toward the 90° side.",
+    min: -1000,
+    max: 1000,
+    step: 0.5,
+    decimals: 2,
+  }).default(0),
+  paperThickness: numberInput({
+    label: "Paper thickness",
+    unit: "mm",
+    help: "Makes the wrap a touch longer, so that it meets. Office paper is about 0.1.",
+    min: 0,
+    max: 3,
+    step: 0.05,
+    decimals: 2,
+  }).default(0.1),
+  allowance: numberInput({
+    label: "Rough-cut allowance",
+    unit: "mm",
+    help: "Spare length to leave before the cope is cut. About an inch is common practice.",
+    min: 0,
+    max: 500,
+    step: 1,
+    decimals: 1,
+  }).default(25),
+  samples: countInput({
+    label: "Points round the tube",
+    unit: "",
+    help: "How many steps the listed curve has. It does not move the other numbers.",
+    min: 8,
+    max: 720,
+    step: 4,
+  }).default(72),
+});
+
+export type SaddleCopeInputs = z.output<typeof saddleCopeInputs>;
