@@ -255,12 +255,27 @@ export const workshopBuild = buildSummary.extend({
 
 export type WorkshopBuild = z.infer<typeof workshopBuild>;
 
+export type WorkshopEntry = z.infer<typeof workshopEntry>;
+
+/** An entry of any of the builder's builds that waits for its time, the soonest first. */
+const scheduledEntry = z.object({
+  id,
+  title: z.string(),
+  scheduledAt: moment,
+  build: z.object({ slug, title: z.string() }),
+});
+
+export type ScheduledEntry = z.infer<typeof scheduledEntry>;
+
 export const listOwnBuilds = endpoint({
   method: "GET",
   path: "/api/workshop",
   access: "signed_in",
   summary: "The viewer's own builds, with entries in every state",
-  response: z.object({ builds: z.array(buildSummary.extend({ draftCount: z.int() })) }),
+  response: z.object({
+    builds: z.array(buildSummary.extend({ draftCount: z.int() })),
+    scheduled: z.array(scheduledEntry).default([]),
+  }),
 });
 
 export const getOwnBuild = endpoint({
