@@ -23,7 +23,7 @@ export function CheckboxField({ label, help, error, id: given, ...input }: Check
         />
         <span className="leading-snug">{label}</span>
       </label>
-      <div className="flex flex-col gap-1 pl-9 empty:hidden">
+      <div className="flex flex-col -mt-2 gap-1 pl-9 empty:hidden">
         {help ? (
           <FieldMessage id={helpId} kind="help">
             {help}

@@ -12,18 +12,17 @@ type NumberTagProps = {
   struck?: boolean;
 };
 
-/** W12, C7, a piece's mark: stamped figures, as a tag wired to the thing. */
+/** W12, C7, a piece's mark: stamped figures on a tag, with the hole for its wire. */
 export function NumberTag({ children, to, tone = "grey", label, struck }: NumberTagProps) {
   const className = clsx(
-    "figures inline-flex h-6 items-center gap-1.5 rounded-r border border-current bg-paper-raised pr-2 pl-1.5",
-    "text-xs font-semibold leading-none no-underline [clip-path:polygon(0.5rem_0,100%_0,100%_100%,0.5rem_100%,0_50%)]",
+    "figures inline-flex h-6 items-center gap-1.5 rounded border border-current bg-paper-raised pr-2 pl-1.5",
+    "text-xs font-semibold leading-none no-underline",
     toneText[tone],
-    struck && "line-through",
   );
   const face = (
     <>
-      <span aria-hidden="true" className="ml-1.5 size-1 rounded-full bg-current" />
-      {children}
+      <span aria-hidden="true" className="size-2 rounded-full border border-current" />
+      <span className={struck ? "line-through" : undefined}>{children}</span>
     </>
   );
   if (!to) {

@@ -29,7 +29,7 @@ export function Plate(props: PlateProps) {
         <Heading className="min-w-0 flex-1 text-sm leading-tight font-semibold tracking-normal">
           {title}
         </Heading>
-        {aside ? <div className="text-xs text-chalk-soft">{aside}</div> : null}
+        {aside ? <div className="text-xs text-chalk-soft max-sm:basis-full">{aside}</div> : null}
       </header>
       <div className={clsx(drawing && children ? "grid @2xl:grid-cols-[minmax(0,3fr)_minmax(0,2fr)]" : "")}>
         {drawing ? <div className="plate-drawing">{drawing}</div> : null}

@@ -12,7 +12,7 @@ type ProgressProps = {
 
 export function Progress({ label, value, detail, onCancel, cancelLabel = "Cancel" }: ProgressProps) {
   const id = useId();
-  const percent = value === undefined ? undefined : `${Math.round(value * 100)} %`;
+  const percent = value === undefined ? undefined : `${Math.round(value * 100)}%`;
   return (
     <div className="flex flex-wrap items-end gap-x-4 gap-y-2">
       <div className="min-w-48 flex-1">

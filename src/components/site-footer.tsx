@@ -6,13 +6,15 @@ import type { NavItem } from "./site-header.tsx";
 type SiteFooterProps = {
   groups: { title: string; links: NavItem[] }[];
   scheme: Scheme;
+  /** More settings, beside the colours. */
+  settings?: ReactNode;
   /** Small print: credits, the demo's remark. */
   children?: ReactNode;
 };
 
-export function SiteFooter({ groups, scheme, children }: SiteFooterProps) {
+export function SiteFooter({ groups, scheme, settings, children }: SiteFooterProps) {
   return (
-    <footer data-chrome className="mt-20 border-t border-hairline text-sm">
+    <footer data-chrome className="graduated-edge mt-20 pt-4 text-sm">
       <div className="page-width py-10">
         <div className="grid gap-x-10 gap-y-8 sm:grid-cols-2 lg:grid-cols-4">
           {groups.map((group) => (
@@ -32,7 +34,10 @@ export function SiteFooter({ groups, scheme, children }: SiteFooterProps) {
         </div>
         <div className="mt-10 flex flex-wrap items-center justify-between gap-x-8 gap-y-3 border-t border-hairline pt-4">
           <div className="max-w-measure text-xs text-ink-soft">{children}</div>
-          <SchemeSwitch scheme={scheme} />
+          <div className="flex flex-wrap gap-x-8">
+            {settings}
+            <SchemeSwitch scheme={scheme} />
+          </div>
         </div>
       </div>
     </footer>

@@ -1,4 +1,5 @@
 import { clsx } from "clsx";
+import type { FormEvent } from "react";
 import { Link, NavLink } from "react-router";
 import { Avatar } from "./avatar.tsx";
 import { Mark } from "./mark.tsx";
@@ -14,17 +15,19 @@ type SiteHeaderProps = {
   viewerLinks?: NavItem[];
   signInTo: string;
   homeTo?: string;
+  /** Where signing out is posted without JavaScript. */
   signOutAction?: string;
+  /** Signs out in place instead. */
+  onSignOut?: () => void;
   /** Unread things, said beside the person's name. */
   unread?: number;
 };
 
-const linkClass =
-  "inline-flex min-h-11 items-center px-3 font-semibold text-chalk-soft! no-underline! hover:text-chalk!";
+const linkClass = "inline-flex min-h-11 items-center px-3 font-semibold no-underline! hover:text-chalk!";
 
 /** A strip of plate over every page. The menus are `details`, so they open without JavaScript. */
 export function SiteHeader(props: SiteHeaderProps) {
-  const { links, viewer, viewerLinks = [], signInTo, homeTo = "/", signOutAction, unread = 0 } = props;
+  const { links, viewer, viewerLinks = [], signInTo, homeTo = "/", unread = 0 } = props;
   return (
     <header data-chrome className="plate rounded-none! border-x-0! border-t-0! text-sm">
       <div className="page-width flex min-h-16 items-center gap-x-4">
@@ -46,7 +49,13 @@ export function SiteHeader(props: SiteHeaderProps) {
         </nav>
         <div className="ml-auto flex items-center">
           {viewer ? (
-            <ViewerMenu viewer={viewer} links={viewerLinks} signOutAction={signOutAction} unread={unread} />
+            <ViewerMenu
+              viewer={viewer}
+              links={viewerLinks}
+              signOutAction={props.signOutAction}
+              onSignOut={props.onSignOut}
+              unread={unread}
+            />
           ) : (
             <Link to={signInTo} className={clsx(linkClass, "text-chalk!")}>
               Sign in
@@ -59,7 +68,7 @@ export function SiteHeader(props: SiteHeaderProps) {
             </summary>
             <nav
               aria-label="Site"
-              className="absolute inset-x-0 top-16 z-40 border-b border-plate-line bg-plate px-4 py-2 shadow-lifted"
+              className="absolute inset-x-0 top-16 z-40 border-b border-plate-line bg-plate px-1 py-2 shadow-lifted"
             >
               <ul>
                 {links.map((link) => (
@@ -83,8 +92,8 @@ function HeaderLink({ link, wide = false }: { link: NavItem; wide?: boolean }) {
       className={({ isActive }) =>
         clsx(
           linkClass,
-          wide && "w-full px-0!",
-          isActive && "text-chalk!",
+          wide && "w-full",
+          isActive ? "text-chalk!" : "text-chalk-soft!",
           isActive && !wide && "chalk-stroke",
         )
       }
@@ -98,10 +107,16 @@ type ViewerMenuProps = {
   viewer: HeaderViewer;
   links: NavItem[];
   signOutAction: string | undefined;
+  onSignOut: (() => void) | undefined;
   unread: number;
 };
 
-function ViewerMenu({ viewer, links, signOutAction, unread }: ViewerMenuProps) {
+function ViewerMenu({ viewer, links, signOutAction, onSignOut, unread }: ViewerMenuProps) {
+  const handleSignOut = (event: FormEvent) => {
+    if (!onSignOut) return;
+    event.preventDefault();
+    onSignOut();
+  };
   return (
     <details name="site-menu" className="relative">
       <summary className="flex min-h-11 list-none items-center gap-2 rounded px-1 font-semibold [&::-webkit-details-marker]:hidden">
@@ -125,8 +140,13 @@ function ViewerMenu({ viewer, links, signOutAction, unread }: ViewerMenuProps) {
           ))}
         </ul>
         {signOutAction ? (
-          <form method="post" action={signOutAction} className="mt-1 border-t border-plate-line pt-1">
-            <button type="submit" className={clsx(linkClass, "w-full cursor-pointer px-0!")}>
+          <form
+            method="post"
+            action={signOutAction}
+            onSubmit={handleSignOut}
+            className="mt-1 border-t border-plate-line pt-1"
+          >
+            <button type="submit" className={clsx(linkClass, "w-full cursor-pointer text-chalk-soft")}>
               Sign out
             </button>
           </form>

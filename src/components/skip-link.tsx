@@ -4,7 +4,7 @@ export function SkipLink({ target = "content" }: { target?: string }) {
     <a
       href={`#${target}`}
       data-chrome
-      className="fixed top-2 left-2 z-50 -translate-y-20 rounded bg-paper-raised px-4 py-3 font-semibold shadow-lifted focus:translate-y-0"
+      className="not-focus:sr-only fixed top-2 left-2 z-50 rounded bg-paper-raised px-4 py-3 font-semibold shadow-lifted"
     >
       Skip to the content
     </a>

@@ -26,13 +26,13 @@ export function SteelRuleBlade({ scale, top, height }: { scale: RuleScale; top: 
             key={mark.x}
             className={mark.size === "month" ? "rule-month" : "rule-week"}
             x={mark.x + (mark.size === "month" ? 5 : 0)}
-            y={top + (mark.size === "month" ? 40 : 27)}
+            y={top + (mark.size === "month" ? 43 : 28)}
           >
             {mark.label}
           </text>
         ) : null,
       )}
-      <text className="rule-division" x={8} y={bottom - 8}>
+      <text className="rule-division" x={end - 34} y={bottom - 9}>
         {perDay >= 3.5 ? "1 DIV = 1 DAY" : perDay >= 1.5 ? "1 DIV = 1 WEEK" : "1 DIV = 1 MONTH"}
       </text>
     </svg>
@@ -52,7 +52,7 @@ function brushLines(width: number, top: number, height: number): string {
   for (let line = 1; line < 12; line += 1) {
     const y = top + (height / 12) * line + ((line * 7) % 3) - 1;
     for (let x = (line * 131) % 173; x < width - 40; x += 260 + ((line * 53) % 90)) {
-      lines.push(`M${x} ${y}h${90 + ((x * 7 + line * 29) % 120)}`);
+      lines.push(`M${x} ${y}h${Math.min(90 + ((x * 7 + line * 29) % 120), width - 16 - x)}`);
     }
   }
   return lines.join("");

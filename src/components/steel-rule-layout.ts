@@ -2,7 +2,7 @@
 
 export const day = 86_400_000;
 const endBlank = 28;
-const shortest = 960;
+const shortest = 1036;
 
 export type RuleScale = { from: number; days: number; perDay: number; width: number };
 export type Graduation = { x: number; size: "day" | "week" | "month"; label?: string };
@@ -40,7 +40,10 @@ export function graduations(scale: RuleScale): Graduation[] {
 function monthLabel(date: Date, perDay: number): string {
   const month = monthName.format(date);
   const room = perDay * 28;
-  if (room >= 80 || date.getUTCMonth() === 0) return `${month} ${date.getUTCFullYear()}`;
+  if (room >= 80) return `${month} ${date.getUTCFullYear()}`;
+  // The year takes January's place and, where that is narrow, February's too.
+  if (room < 34 && date.getUTCMonth() === 1) return "";
+  if (date.getUTCMonth() === 0) return String(date.getUTCFullYear());
   return room >= 34 ? month : month.charAt(0);
 }
 

@@ -31,7 +31,7 @@ export type SteelRuleProps = {
 const photoWidth = 96;
 const photoHeight = 64;
 const tabWidth = 48;
-const bladeHeight = 72;
+const bladeHeight = 80;
 const date = new Intl.DateTimeFormat("en-GB", {
   day: "numeric",
   month: "short",
@@ -51,7 +51,7 @@ export function SteelRule({ label, from, to, ticks, photos }: SteelRuleProps) {
     <div className="steel-rule not-prose">
       {/* biome-ignore lint/a11y/noNoninteractiveTabindex: a region that scrolls must take the keyboard */}
       <section aria-label={label} tabIndex={0} className="steel-rule-scroller">
-        <svg width={scale.width} height={top + bladeHeight + 112} className="block" role="presentation">
+        <svg width={scale.width} height={top + bladeHeight + 120} className="block" role="presentation">
           <PhotoRow scale={scale} photos={photos} edge={top} />
           <SteelRuleBlade scale={scale} top={top} height={bladeHeight} />
           <BackLines scale={scale} ticks={inOrder} edge={top + bladeHeight} />
@@ -90,14 +90,13 @@ function BackLines({ scale, ticks, edge }: { scale: RuleScale; ticks: RuleTick[]
   return overturned.map((tick, lane) => {
     const y = edge + 9 + (lane % 3) * 6;
     const start = ruleX(scale, tick.date);
-    const end = ruleX(scale, tick.backTo ?? tick.date);
-    const head = end < start ? 7 : -7;
+    const wanted = ruleX(scale, tick.backTo ?? tick.date);
+    // The arrowhead stands beside the other tick, not on it.
+    const end = wanted + Math.sign(start - wanted) * 7;
     return (
       <g key={tick.href} className="rule-back">
         <path d={`M${start} ${edge}V${y}H${end}V${edge + 2}`} />
-        <path
-          d={`M${end - 4} ${edge + Math.abs(head) + 1}L${end} ${edge + 1}L${end + 4} ${edge + Math.abs(head) + 1}`}
-        />
+        <path d={`M${end - 4} ${edge + 8}L${end} ${edge + 1}l4 7`} />
       </g>
     );
   });
@@ -118,16 +117,17 @@ function TickRow({ scale, ticks, edge }: { scale: RuleScale; ticks: RuleTick[]; 
     return (
       <g key={tick.href} className={over ? "rule-tick rule-tick-over" : "rule-tick"}>
         <path
-          className={clsx("rule-tick-line", tick.major && "rule-tick-major")}
-          d={`M${foot} ${edge - (tick.major ? 40 : 22)}V${edge + 6}L${x + 8} ${edge + 22}V${tabTop + 4}`}
+          className={clsx("rule-tick-cut", tick.major && "rule-tick-major")}
+          d={`M${foot} ${edge - (tick.major ? 33 : 20)}V${edge}`}
         />
-        <foreignObject x={x} y={tabTop} width={Math.min(Math.max(room, tabWidth - 4), 184)} height={80}>
+        <path className="rule-tick-line" d={`M${foot} ${edge}v6L${x + 8} ${edge + 22}V${tabTop + 4}`} />
+        <foreignObject x={x} y={tabTop} width={Math.min(Math.max(room, tabWidth - 4), 184)} height={88}>
           <Link to={tick.href} className="rule-tab" aria-label={spoken(tick)} title={tick.label}>
             <span className="rule-tab-number">
               {over ? <span aria-hidden="true">×</span> : null}
               {tick.number}
             </span>
-            {room >= 104 ? <span className="rule-tab-label">{tick.label}</span> : null}
+            {room >= 84 ? <span className="rule-tab-label">{tick.label}</span> : null}
           </Link>
         </foreignObject>
       </g>

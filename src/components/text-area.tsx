@@ -20,7 +20,7 @@ export function TextArea(props: TextAreaProps) {
         {...area}
         id={id}
         rows={rows}
-        className={clsx("control field-sizing-content", className)}
+        className={clsx("control min-h-28 field-sizing-content", className)}
         aria-invalid={error ? true : undefined}
         aria-describedby={describedBy}
       />
