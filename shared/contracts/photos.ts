@@ -26,7 +26,7 @@ export const photoView = z.object({
   width: z.int(),
   height: z.int(),
   rotation: z.union([z.literal(0), z.literal(90), z.literal(180), z.literal(270)]),
-  /** Data URL of a picture a few pixels wide, shown until the photo has come. */
+  /** Thumbhash (base64, about 30 bytes) of what to show until the photo has come. */
   placeholder: z.string().nullable(),
   webp: z.array(photoSource),
   avif: z.array(photoSource),

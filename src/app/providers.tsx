@@ -1,5 +1,5 @@
 import { type QueryClient, QueryClientProvider } from "@tanstack/react-query";
-import type { ReactNode } from "react";
+import { type ReactNode, useMemo, useState } from "react";
 import type { PageSettings } from "#shared/contracts/rendering.ts";
 import { type Api, ApiProvider } from "#src/lib/api.ts";
 import { PageSettingsProvider } from "#src/lib/page-settings.ts";
@@ -11,9 +11,17 @@ interface ProvidersProps {
   children: ReactNode;
 }
 
-export function Providers({ api, queryClient, settings, children }: ProvidersProps) {
+export function Providers({ api, queryClient, settings: given, children }: ProvidersProps) {
+  const [settings, setSettings] = useState(given);
+  const changeable = useMemo(
+    () => ({
+      settings,
+      change: (part: Partial<PageSettings>) => setSettings((before) => ({ ...before, ...part })),
+    }),
+    [settings],
+  );
   return (
-    <PageSettingsProvider value={settings}>
+    <PageSettingsProvider value={changeable}>
       <ApiProvider value={api}>
         <QueryClientProvider client={queryClient}>{children}</QueryClientProvider>
       </ApiProvider>

@@ -1,4 +1,3 @@
-import { thumbHashToDataURL } from "thumbhash";
 import { type PhotoView, photoWidths } from "#shared/contracts/photos.ts";
 import type { PictureFormat } from "./image.ts";
 import type { PhotoRow } from "./repository.ts";
@@ -36,7 +35,7 @@ export function photoView(photo: PhotoRow): PhotoView {
     width: photo.width,
     height: photo.height,
     rotation: photo.rotation as PhotoView["rotation"],
-    placeholder: photo.thumbhash && thumbHashToDataURL(Buffer.from(photo.thumbhash, "base64")),
+    placeholder: photo.thumbhash,
     webp: files(photo.webpWidths, "webp"),
     avif: files(photo.avifWidths, "avif"),
   };
