@@ -1,7 +1,7 @@
 import type { Connection, Database } from "#server/db/client.ts";
 import type { BuildSummary, StageView } from "#shared/contracts/builds.ts";
 import type { PhotoView } from "#shared/contracts/photos.ts";
-import { type BuildCardRow, findCards } from "./repository.ts";
+import { type BuildCardRow, type BuildRow, findBuildBySlug, findCards } from "./repository.ts";
 import { type CountedStageRow, listStages, type StageCount } from "./stage-repository.ts";
 
 /** How photos come to other features: many at once, by id. */
@@ -41,7 +41,12 @@ export function createBuildReader({ database, photoViews }: { database: Database
     return listStages(connection, buildId, which).map(toStageView);
   }
 
-  return { toSummaries, summaries, stagesOf };
+  /** The build at a present or former address, whoever may see it. */
+  function find(slug: string): BuildRow | undefined {
+    return findBuildBySlug(database, slug);
+  }
+
+  return { find, toSummaries, summaries, stagesOf };
 }
 
 export function toStageView({ id, title, state, entryCount }: CountedStageRow): StageView {
