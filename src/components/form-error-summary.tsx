@@ -19,10 +19,10 @@ export function FormErrorSummary({ errors, title, ref }: FormErrorSummaryProps) 
         <Mark shape="cross" className="size-4 text-signal" />
         {heading}
       </p>
-      <ul className="mt-2 flex flex-col gap-1 pl-6">
+      <ul className="mt-1 flex flex-col pl-6">
         {errors.map((error) => (
           <li key={error.fieldId}>
-            <a href={`#${error.fieldId}`} className="inline-block py-1 text-ink!">
+            <a href={`#${error.fieldId}`} className="inline-flex min-h-11 items-center text-ink!">
               {error.message}
             </a>
           </li>

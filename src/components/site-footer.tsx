@@ -16,7 +16,7 @@ export function SiteFooter({ groups, scheme, settings, children }: SiteFooterPro
   return (
     <footer data-chrome className="graduated-edge mt-20 pt-4 text-sm">
       <div className="page-width py-10">
-        <div className="grid gap-x-10 gap-y-8 sm:grid-cols-2 lg:grid-cols-4">
+        <div className="grid grid-cols-2 gap-x-6 gap-y-8 lg:grid-cols-4 lg:gap-x-10">
           {groups.map((group) => (
             <nav key={group.title} aria-label={group.title}>
               <p className="mb-1 text-xs font-semibold text-ink-soft">{group.title}</p>
