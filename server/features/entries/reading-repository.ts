@@ -1,6 +1,7 @@
 import { and, asc, desc, eq, gt, isNull, lt, type SQL, sql } from "drizzle-orm";
 import { alias } from "drizzle-orm/sqlite-core";
 import type { Connection } from "#server/db/client.ts";
+import { users } from "#server/db/schema/accounts.ts";
 import { builds, entries, slugRedirects } from "#server/db/schema/builds.ts";
 import { type PagePosition, pageSize } from "#server/http/paging.ts";
 
@@ -51,9 +52,15 @@ export function latestPublic(connection: Connection, after: PagePosition | null)
 /** Every public entry's address, for the sitemap; capped at what one sitemap may hold. */
 export function listPublicAddresses(connection: Connection, most: number) {
   return connection
-    .select({ build: builds.slug, entry: entries.slug, updatedAt: entries.publishedUpdatedAt })
+    .select({
+      build: builds.slug,
+      entry: entries.slug,
+      person: users.handle,
+      updatedAt: entries.publishedUpdatedAt,
+    })
     .from(entries)
     .innerJoin(builds, eq(builds.id, entries.buildId))
+    .innerJoin(users, eq(users.id, builds.ownerId))
     .where(isPublic)
     .orderBy(desc(entries.publishedAt), desc(entries.id))
     .limit(most)

@@ -1,5 +1,5 @@
 import { AppError } from "#server/http/errors.ts";
-import { onePage, readCursor } from "#server/http/paging.ts";
+import { onePage, pageSize, readCursor } from "#server/http/paging.ts";
 import type { Viewer } from "#server/http/viewer.ts";
 import type { BuildSummary, EntrySummary } from "#shared/contracts/builds.ts";
 import type { EntryPage } from "#shared/contracts/entries.ts";
@@ -86,12 +86,21 @@ export function createReading({ database, builds, photoViews }: EntryParts) {
     };
   }
 
+  /** A public build with its newest entries first, at a present or former address; null when there is none. */
+  function newestOfBuild(slug: string): { build: BuildSummary; entries: ListedEntry[] } | null {
+    const found = builds.find(slug);
+    const build = found?.publishedAt ? builds.summaries([found.id]).get(found.id) : undefined;
+    if (!build) return null;
+    const newest = listPublicOfBuild(database, build.id).reverse().slice(0, pageSize);
+    return { build, entries: toListed(newest) };
+  }
+
   /** Addresses of public entries with the time each last changed, newest first. */
   function addresses(most: number) {
     return listPublicAddresses(database, most);
   }
 
-  return { ofBuild, latest, get, addresses };
+  return { ofBuild, latest, get, newestOfBuild, addresses };
 }
 
 function toNeighbour(row: { number: number | null; slug: string; title: string | null } | undefined) {
