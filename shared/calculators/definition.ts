@@ -1,5 +1,6 @@
 import type { z } from "zod";
 import type { Result } from "#shared/result.ts";
+import type { TemplateNames, TemplateSheet } from "#shared/templates/sheet.ts";
 import { describeInputs, type InputField } from "./inputs.ts";
 
 /** Why a calculator gave no results. `field` is the input's name; nested ones are joined by dots (`ends.0.angle`). */
@@ -50,6 +51,8 @@ export interface CalculatorDefinition<
   /** Inputs of a worked example; those with a default may be left out. */
   example: z.input<Schema>;
   compute(inputs: z.output<Schema>): Result<Results, CalculatorIssue>;
+  /** A full-size sheet to mark steel with, for those calculators that have one. */
+  template?(inputs: z.output<Schema>, results: Results, names: TemplateNames): TemplateSheet;
   resultFields: readonly ResultField[];
   cautions: readonly string[];
   method: Method;

@@ -1,5 +1,6 @@
 import type { z } from "zod";
 import { fail, ok, type Result } from "#shared/result.ts";
+import type { TemplateNames, TemplateSheet } from "#shared/templates/sheet.ts";
 import type { CalculatorDefinition, CalculatorIssue } from "./definition.ts";
 import { saddleCope } from "./saddle-cope/definition.ts";
 
@@ -43,6 +44,15 @@ export function runCalculator(id: string, rawInputs: unknown): Result<Calculator
     inputs: parsed.data,
     results: computed.value,
   });
+}
+
+/**
+ * The full-size sheet of a finished sum; `undefined` when this calculator has none.
+ *
+ * @param run as `runCalculator` gave it, so that inputs and results belong together
+ */
+export function templateOf(run: CalculatorRun, names: TemplateNames): TemplateSheet | undefined {
+  return findCalculator(run.calculator)?.template?.(run.inputs, run.results, names);
 }
 
 function firstIssue(error: z.ZodError): CalculatorIssue {

@@ -1,6 +1,7 @@
 import { defineCalculator } from "../definition.ts";
 import { saddleCope as compute } from "./formula.ts";
 import { saddleCopeInputs } from "./inputs.ts";
+import { copeTemplate } from "./template.ts";
 
 /** The end of a round tube (branch) fitted to the side of another round tube (header). */
 export const saddleCope = defineCalculator({
@@ -23,6 +24,7 @@ export const saddleCope = defineCalculator({
   inputs: saddleCopeInputs,
   example: { headerOd: 44.5, branchOd: 38.1, branchWall: 2.5, angle: 60, offset: 0 },
   compute,
+  template: copeTemplate,
   resultFields: [
     {
       name: "deepest",
