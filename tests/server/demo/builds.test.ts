@@ -6,6 +6,7 @@ import { demoPeople } from "#server/demo/people.ts";
 import { photoAlts, photoFile, photoNames } from "#server/demo/photos.ts";
 import { photosOf, placePhotos } from "#server/demo/place-photos.ts";
 import type { QuotedFigure } from "#server/demo/types.ts";
+import { slugFromTitle } from "#server/naming/slugs.ts";
 import { runCalculator } from "#shared/calculators/registry.ts";
 import { countWords, photosIn, plainText, workingsIn } from "#shared/document/read.ts";
 import { validateDocument } from "#shared/document/validate.ts";
@@ -98,6 +99,10 @@ describe.each(entries)("$address", ({ build, entry, document }) => {
     expect(countWords(document)).toBeLessThanOrEqual(900);
     expect(entry.summary.length).toBeGreaterThan(40);
     expect(entry.summary.length).toBeLessThanOrEqual(300);
+  });
+
+  it("has the address that its title gives", () => {
+    expect(slugFromTitle(entry.title, "")).toBe(entry.slug);
   });
 
   it("stands in a stage of its build", () => {
