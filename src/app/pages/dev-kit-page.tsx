@@ -9,7 +9,7 @@ import { KitStates } from "./dev-kit/kit-states.tsx";
 import { KitType } from "./dev-kit/kit-type.tsx";
 
 /** Every part of the kit in its states, for whoever changes one of them. */
-export function DevKitPage() {
+export function Component() {
   return (
     <div className="page-width py-10">
       <PageHeading

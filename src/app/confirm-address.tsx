@@ -1,0 +1,53 @@
+import { useMutation } from "@tanstack/react-query";
+import { Button } from "#src/components/button.tsx";
+import { Notice } from "#src/components/notice.tsx";
+import { useHydrated } from "#src/lib/use-hydrated.ts";
+import { useViewer } from "#src/lib/viewer.ts";
+
+async function sendAgain(email: string): Promise<void> {
+  const response = await fetch("/api/auth/send-verification-email", {
+    method: "POST",
+    headers: { "Content-Type": "application/json" },
+    body: JSON.stringify({ email }),
+  }).catch(() => null);
+  if (response?.status === 429) throw new Error("Enough letters for now. Wait a minute, then ask again.");
+  if (!response?.ok) throw new Error("The letter could not be sent. Check the connection and try again.");
+}
+
+/** Says that the e-mail address comes first, and sends the letter again. */
+export function ConfirmAddress({ before }: { before: string }) {
+  const hydrated = useHydrated();
+  const viewer = useViewer();
+  const resend = useMutation({ mutationFn: sendAgain });
+  if (!viewer) return null;
+  return (
+    <div className="flex max-w-measure flex-col gap-3">
+      <Notice
+        kind="attention"
+        title="Confirm your address first"
+        actions={
+          <Button
+            disabled={!hydrated}
+            busy={resend.isPending}
+            busyLabel="Sending the letter…"
+            onClick={() => resend.mutate(viewer.email)}
+          >
+            Send the letter again
+          </Button>
+        }
+      >
+        We sent a letter to {viewer.email}. Open the link in it, then you can {before}.
+      </Notice>
+      {resend.isSuccess ? (
+        <Notice kind="success" role="status">
+          A new letter is on its way to {viewer.email}.
+        </Notice>
+      ) : null}
+      {resend.error ? (
+        <Notice kind="error" role="alert">
+          {resend.error.message}
+        </Notice>
+      ) : null}
+    </div>
+  );
+}
