@@ -6,13 +6,19 @@ import type { Logger } from "pino";
 import type { Config } from "./config/environment.ts";
 import type { Database } from "./db/client.ts";
 import { siteVersion } from "./db/schema/audit.ts";
+import { serveAuth, sessionMiddleware } from "./features/accounts/auth-http.ts";
+import { feedRoutes } from "./features/feeds/routes.ts";
+import { photoFiles } from "./features/photos/files.ts";
+import { scheduleCleaning } from "./features/photos/jobs.ts";
+import { createFeatures } from "./features.ts";
 import type { ClientBuild } from "./http/client-build.ts";
-import { apiRouter, inProcessCaller, type Route } from "./http/endpoints.ts";
+import { apiRouter, inProcessCaller } from "./http/endpoints.ts";
 import { AppError, handleErrors } from "./http/errors.ts";
 import { createPageCache, noPageCache } from "./http/page-cache.ts";
 import { pages } from "./http/pages.ts";
 import { securityHeaders } from "./http/security-headers.ts";
 import { createQueue } from "./jobs/queue.ts";
+import { createLocalStorage } from "./storage/local-storage.ts";
 
 interface AppParts {
   config: Config;
@@ -23,37 +29,38 @@ interface AppParts {
   client?: ClientBuild;
 }
 
-export type App = Awaited<ReturnType<typeof createApp>>;
+export type App = ReturnType<typeof createApp>;
 
-/** Wires everything without listening: features meet here and nowhere else. */
-export async function createApp({ config, database, log, clock, client }: AppParts) {
+/** Wires everything without listening. */
+export function createApp({ config, database, log, clock, client }: AppParts) {
   const queue = createQueue({ database, log, clock });
-  const routes: Route[] = [];
+  const storage = createLocalStorage(config.UPLOADS_DIR);
+  const { mail, auth, photos, entries, routes } = createFeatures({
+    config,
+    database,
+    log,
+    clock,
+    queue,
+    storage,
+  });
+  const development = config.NODE_ENV === "development";
 
   const app = express();
   app.disable("x-powered-by");
   app.set("trust proxy", config.TRUSTED_PROXIES);
-  app.use(
-    securityHeaders({
-      https: config.SITE_URL.startsWith("https:"),
-      development: config.NODE_ENV === "development",
-    }),
-  );
+  app.use(securityHeaders({ https: config.SITE_URL.startsWith("https:"), development }));
   app.use(compression());
   serveStaticFiles(app);
-  app.use((req, _res, next) => {
-    req.viewer = null;
-    next();
-  });
+  app.all("/api/auth/{*any}", serveAuth(auth));
+  app.use(sessionMiddleware(auth));
   app.use(apiRouter(routes));
   app.use("/api", () => {
     throw new AppError("not_found", "There is no such route.");
   });
+  app.use(photoFiles({ photos, storage, log }));
+  app.use(feedRoutes({ source: entries.reading, siteUrl: config.SITE_URL, clock }));
   if (client) {
-    const cache =
-      config.NODE_ENV === "development"
-        ? noPageCache
-        : createPageCache(() => readSiteVersion(database), clock);
+    const cache = development ? noPageCache : createPageCache(() => readSiteVersion(database), clock);
     const call = inProcessCaller(routes);
     app.get("/{*path}", pages({ client, call, cache, siteUrl: config.SITE_URL, fakes: config.FAKES, log }));
   }
@@ -64,10 +71,13 @@ export async function createApp({ config, database, log, clock, client }: AppPar
     routes,
     queue,
     async start() {
+      await mail.start();
+      scheduleCleaning({ queue, clock });
       queue.start();
     },
     async stop() {
       await queue.stop();
+      await mail.stop();
     },
   };
 }

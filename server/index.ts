@@ -4,7 +4,10 @@ import { createApp } from "./app.ts";
 import { readConfig } from "./config/environment.ts";
 import { openDatabase } from "./db/client.ts";
 import { migrateDatabase } from "./db/migrate.ts";
+import { demoState, loadDemo } from "./demo/loader.ts";
+import { demoPeople } from "./demo/people.ts";
 import { builtClient, type ClientBuild, developmentClient } from "./http/client-build.ts";
+import { createLocalStorage } from "./storage/local-storage.ts";
 
 const config = readConfig(process.env);
 const log = pino({ level: config.LOG_LEVEL });
@@ -15,7 +18,9 @@ const server = createServer();
 const development = config.NODE_ENV === "development";
 const vite = development ? await startVite() : null;
 const client: ClientBuild = vite ? developmentClient(vite) : await builtClient();
-const { app, start, stop } = await createApp({ config, database, log, clock: Date.now, client });
+if (config.DEMO)
+  await loadDemo({ database, storage: createLocalStorage(config.UPLOADS_DIR), log, now: Date.now() });
+const { app, start, stop } = createApp({ config, database, log, clock: Date.now, client });
 
 server.on("request", (req, res) => {
   if (!vite) return app(req, res);
@@ -23,8 +28,18 @@ server.on("request", (req, res) => {
 });
 server.listen(config.PORT, config.HOST, async () => {
   await start();
-  process.stdout.write(`\nSoapstone is at ${config.SITE_URL}\n`);
+  announce();
 });
+
+/** Tells whoever started it where it is and, while the demo is loaded, who to sign in as. */
+function announce(): void {
+  const signIns = demoState(database) === "loaded" ? demoPeople : [];
+  const lines = signIns.map(
+    ({ email, password, what }) => `  ${email.padEnd(28)}${password.padEnd(28)}${what}`,
+  );
+  const demo = lines.length > 0 ? `\nDemo sign-ins:\n${lines.join("\n")}\n` : "";
+  process.stdout.write(`\nSoapstone is at ${config.SITE_URL}\n${demo}`);
+}
 
 /** Compiles the client on demand; hot reload shares the one port. */
 async function startVite() {

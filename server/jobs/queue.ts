@@ -2,7 +2,16 @@ import type { Logger } from "pino";
 import { v7 as uuid } from "uuid";
 import type { z } from "zod";
 import type { Connection, Database } from "#server/db/client.ts";
-import { forgetDone, insertJob, type Job, leaseDueJob, markDone, markFailed, markForRetry } from "./store.ts";
+import {
+  countDue,
+  forgetDone,
+  insertJob,
+  type Job,
+  leaseDueJob,
+  markDone,
+  markFailed,
+  markForRetry,
+} from "./store.ts";
 
 export interface JobOptions<Payload> {
   /** Tries before the job is given up as failed. */
@@ -190,5 +199,10 @@ export function createQueue({ database, log, clock, pollMs = 1_000 }: QueueParts
     await Promise.all(inFlight);
   }
 
-  return { register, enqueue, runDue, start, stop };
+  /** Jobs that run now or are due and wait. */
+  function dueCount(): number {
+    return countDue(database, clock());
+  }
+
+  return { register, enqueue, runDue, dueCount, start, stop };
 }

@@ -1,4 +1,4 @@
-import { and, asc, eq, inArray, lte, or, sql } from "drizzle-orm";
+import { and, asc, count, eq, inArray, lte, or, sql } from "drizzle-orm";
 import type { Connection } from "#server/db/client.ts";
 import { jobs } from "#server/db/schema/jobs.ts";
 
@@ -75,4 +75,10 @@ export function forgetDone(connection: Connection, before: number): void {
     .delete(jobs)
     .where(and(eq(jobs.state, "done"), lte(jobs.finishedAt, before)))
     .run();
+}
+
+/** How many jobs run now or are due and wait. */
+export function countDue(connection: Connection, now: number): number {
+  const due = or(eq(jobs.state, "running"), and(eq(jobs.state, "queued"), lte(jobs.runAt, now)));
+  return connection.select({ due: count() }).from(jobs).where(due).get()?.due ?? 0;
 }

@@ -41,8 +41,11 @@ export const getMe = endpoint({
   response: z.object({ me: me.nullable() }),
 });
 
+/** The name a person goes by here. */
+export const displayName = requiredLine("Display name", 60);
+
 export const updateProfileBody = z.object({
-  name: requiredLine("Display name", 60).optional(),
+  name: displayName.optional(),
   bio: z.string().trim().max(600, "The text about you may be at most 600 characters.").optional(),
   units: unitPreference.optional(),
   avatarPhotoId: id.nullable().optional(),
