@@ -274,7 +274,7 @@ export const listOwnBuilds = endpoint({
   summary: "The viewer's own builds, with entries in every state",
   response: z.object({
     builds: z.array(buildSummary.extend({ draftCount: z.int() })),
-    scheduled: z.array(scheduledEntry).default([]),
+    scheduled: z.array(scheduledEntry),
   }),
 });
 

@@ -125,23 +125,34 @@ export function listOwnEntries(connection: Connection, buildId: string) {
     .all();
 }
 
-/** A person's builds, the last worked on first, with how many entries of each are not public. */
+/** A person's builds, the last worked on first, with how many drafts each has. */
 export function listOwnBuilds(connection: Connection, ownerId: string) {
   const hidden = alias(entries, "hidden");
   const draftCount = connection
     .select({ n: sql<number>`count(*)` })
     .from(hidden)
-    .where(
-      and(
-        eq(hidden.buildId, builds.id),
-        isNull(hidden.deletedAt),
-        sql`${hidden.state} in ('draft', 'scheduled')`,
-      ),
-    );
+    .where(and(eq(hidden.buildId, builds.id), isNull(hidden.deletedAt), eq(hidden.state, "draft")));
   return connection
     .select({ id: builds.id, draftCount: sql<number>`(${draftCount})` })
     .from(builds)
     .where(eq(builds.ownerId, ownerId))
     .orderBy(desc(builds.updatedAt), desc(builds.id))
+    .all();
+}
+
+/** What a person has scheduled in all their builds, the soonest first. */
+export function listScheduled(connection: Connection, ownerId: string) {
+  return connection
+    .select({
+      id: entries.id,
+      title: entries.title,
+      scheduledAt: entries.scheduledAt,
+      buildSlug: builds.slug,
+      buildTitle: builds.title,
+    })
+    .from(builds)
+    .innerJoin(entries, eq(entries.buildId, builds.id))
+    .where(and(eq(builds.ownerId, ownerId), eq(entries.state, "scheduled"), isNull(entries.deletedAt)))
+    .orderBy(asc(entries.scheduledAt), asc(entries.id))
     .all();
 }

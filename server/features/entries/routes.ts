@@ -29,7 +29,10 @@ function readingRoutes({ reading, workshop }: EntryService): Route[] {
   return [
     route(latestEntries, ({ query }) => reading.latest(query.after)),
     route(getEntry, ({ params }, { viewer }) => reading.get(viewer, params.build, params.entry)),
-    route(listOwnBuilds, (_request, { viewer }) => ({ builds: workshop.list(signedIn(viewer)) })),
+    route(listOwnBuilds, (_request, { viewer }) => ({
+      builds: workshop.list(signedIn(viewer)),
+      scheduled: workshop.scheduled(signedIn(viewer)),
+    })),
     route(getOwnBuild, ({ params }, { viewer }) => workshop.get(signedIn(viewer), params.build)),
   ];
 }

@@ -1,9 +1,9 @@
 import { AppError } from "#server/http/errors.ts";
 import type { Person } from "#server/http/viewer.ts";
 import type { BuildSummary } from "#shared/contracts/builds.ts";
-import type { WorkshopBuild } from "#shared/contracts/entries.ts";
+import type { ScheduledEntry, WorkshopBuild } from "#shared/contracts/entries.ts";
 import type { EntryParts } from "./parts.ts";
-import { listOwnBuilds, listOwnEntries } from "./reading-repository.ts";
+import { listOwnBuilds, listOwnEntries, listScheduled } from "./reading-repository.ts";
 import { hasUnpublishedChanges } from "./views.ts";
 
 /** The builder's own side: every build of theirs, every entry in every state. */
@@ -15,6 +15,12 @@ export function createWorkshop({ database, builds }: EntryParts) {
       const build = summaries.get(id);
       return build ? [{ ...build, draftCount }] : [];
     });
+  }
+
+  function scheduled(viewer: Person): ScheduledEntry[] {
+    return listScheduled(database, viewer.id).flatMap(({ id, title, scheduledAt, buildSlug, buildTitle }) =>
+      scheduledAt === null ? [] : [{ id, title, scheduledAt, build: { slug: buildSlug, title: buildTitle } }],
+    );
   }
 
   function get(viewer: Person, slug: string): WorkshopBuild {
@@ -32,5 +38,5 @@ export function createWorkshop({ database, builds }: EntryParts) {
     };
   }
 
-  return { list, get };
+  return { list, scheduled, get };
 }
