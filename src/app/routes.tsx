@@ -20,7 +20,18 @@ export function routes(context: LoadContext): RouteObject[] {
       children: [
         {
           errorElement: <ErrorPage />,
-          children: [page(context, "/", "home"), page(context, "*", "not-found")],
+          children: [
+            page(context, "/", "home"),
+            page(context, "/builds", "builds"),
+            page(context, "/builds/:build", "build"),
+            page(context, "/builds/:build/entries/:entry", "entry"),
+            page(context, "/people/:handle", "person"),
+            page(context, "/workshop", "workshop"),
+            page(context, "/workshop/builds/new", "new-build"),
+            page(context, "/workshop/builds/:build", "own-build"),
+            page(context, "/dev/kit", "dev-kit"),
+            page(context, "*", "not-found"),
+          ],
         },
       ],
     },

@@ -17,15 +17,19 @@ type PhotoProps = {
   caption?: ReactNode;
   /** The first picture of a page: loaded at once and first. */
   priority?: boolean;
+  /** Cut to this shape, for a list of pictures of unlike shapes. */
+  crop?: "3/2" | "1/1";
   className?: string;
 };
+
+const crops = { "3/2": "aspect-[3/2] object-cover", "1/1": "aspect-square object-cover" };
 
 const srcSet = (files: PhotoSource["files"]) => files.map((file) => `${file.src} ${file.width}w`).join(", ");
 
 /** A photo in its own shape, edge to edge on a phone, caption under it. */
 export function Photo(props: PhotoProps) {
   const { src, alt, width, height, sources = [], sizes = "(min-width: 60rem) 51rem, 100vw" } = props;
-  const { thumbhash, caption, priority, className } = props;
+  const { thumbhash, caption, priority, crop, className } = props;
   return (
     <figure className={clsx("not-prose", className)}>
       <picture>
@@ -40,7 +44,7 @@ export function Photo(props: PhotoProps) {
           decoding="async"
           loading={priority ? "eager" : "lazy"}
           fetchPriority={priority ? "high" : undefined}
-          className="h-auto w-full bg-grey-wash sm:rounded"
+          className={clsx("w-full bg-grey-wash sm:rounded", crop ? crops[crop] : "h-auto")}
           style={thumbhash ? placeholderBackground(thumbhash) : undefined}
         />
       </picture>

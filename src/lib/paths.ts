@@ -2,13 +2,12 @@
 export const paths = {
   home: () => "/",
   builds: () => "/builds",
-  buildsWith: (query: { status?: string | undefined; after?: string | undefined }) => {
-    const given = Object.entries(query).filter((pair): pair is [string, string] => pair[1] !== undefined);
-    return given.length > 0 ? `/builds?${new URLSearchParams(given)}` : "/builds";
-  },
+  buildsWith: (query: Record<string, string>) => `/builds?${new URLSearchParams(query)}`,
   build: (build: string) => `/builds/${build}`,
   buildAtomFeed: (build: string) => `/builds/${build}/feed.atom`,
   buildJsonFeed: (build: string) => `/builds/${build}/feed.json`,
+  /** The place of a stage on its build's page. */
+  stage: (build: string, stageId: string) => `/builds/${build}#stage-${stageId}`,
   entry: (build: string, entry: string) => `/builds/${build}/entries/${entry}`,
   person: (handle: string) => `/people/${handle}`,
   signIn: (next?: string) => (next ? `/sign-in?next=${encodeURIComponent(next)}` : "/sign-in"),

@@ -1,0 +1,39 @@
+import type { WorkingAttributes } from "#shared/document/types.ts";
+import { MarginRow } from "#src/components/margin-row.tsx";
+import { NumberTag } from "#src/components/number-tag.tsx";
+import type { DocumentSlots } from "#src/editor/document-slots.ts";
+import { PhotoBlock, PhotoGroupBlock } from "#src/features/reading/components/photo-blocks.tsx";
+import { useEntryMedia, workingAnchor } from "#src/features/reading/entry-media.ts";
+import { Island } from "#src/lib/island.tsx";
+import { useUnits } from "#src/lib/page-settings.ts";
+import { workingPanel } from "./working-island.ts";
+
+/** A working as readers get it: the calculator itself, with the builder's numbers in it. */
+function WorkingBlock({ workingId, calculator, title, inputs }: WorkingAttributes) {
+  const working = useEntryMedia().workings[workingId];
+  const units = useUnits();
+  if (!working) return null;
+  const anchor = workingAnchor(working.number);
+  const label = `Working ${working.number}: ${title}`;
+  return (
+    <MarginRow
+      wide
+      notes={
+        <NumberTag to={`#${anchor}`} label={label}>
+          W{working.number}
+        </NumberTag>
+      }
+    >
+      <div id={anchor} className="scroll-mt-6">
+        <Island source={workingPanel} props={{ calculator, title, inputs, units }} />
+      </div>
+    </MarginRow>
+  );
+}
+
+/** How the blocks of an entry that belong to features are shown to readers. */
+export const entrySlots: DocumentSlots = {
+  photo: PhotoBlock,
+  photoGroup: PhotoGroupBlock,
+  working: WorkingBlock,
+};
