@@ -72,7 +72,7 @@ export const offcutAndMarker: DemoEntry = {
     ),
     h2("Where it stops working"),
     p(
-      "At a slant you can still do it, leaning the offcut at the same angle toward the tight corner, but the sighting gets worse as it leans, and below about 60° I would rather find someone with a printer. The depths on the four lines are right at any angle, though. Mark those, join them by eye, cut short of the line, and creep up on it.",
+      "At a slant you can still do it: stand the offcut on the heel line and lean it back along the branch, at the angle of the joint. But the sighting gets worse as it leans, and below about 60° I would rather find someone with a printer. The depths on the four lines are right at any angle, though. Mark those, join them by eye, cut short of the line, and creep up on it.",
     ),
   ],
   quoted: [
