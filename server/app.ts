@@ -6,7 +6,7 @@ import type { Logger } from "pino";
 import type { Config } from "./config/environment.ts";
 import type { Database } from "./db/client.ts";
 import { siteVersion } from "./db/schema/audit.ts";
-import { serveAuth, sessionMiddleware } from "./features/accounts/auth-http.ts";
+import { serveAuth, sessionMiddleware, signOutForm } from "./features/accounts/auth-http.ts";
 import { feedRoutes } from "./features/feeds/routes.ts";
 import { photoFiles } from "./features/photos/files.ts";
 import { scheduleCleaning } from "./features/photos/jobs.ts";
@@ -18,6 +18,8 @@ import { createPageCache, noPageCache } from "./http/page-cache.ts";
 import { pages } from "./http/pages.ts";
 import { securityHeaders } from "./http/security-headers.ts";
 import { createQueue } from "./jobs/queue.ts";
+import { mailFakeRoutes } from "./mail/fake/routes.ts";
+import { mailFakeFolder } from "./mail/mail.ts";
 import { createLocalStorage } from "./storage/local-storage.ts";
 
 interface AppParts {
@@ -52,6 +54,7 @@ export function createApp({ config, database, log, clock, client }: AppParts) {
   app.use(compression());
   serveStaticFiles(app);
   app.all("/api/auth/{*any}", serveAuth(auth));
+  app.post("/sign-out", signOutForm(auth));
   app.use(sessionMiddleware(auth));
   app.use(apiRouter(routes));
   app.use("/api", () => {
@@ -59,6 +62,7 @@ export function createApp({ config, database, log, clock, client }: AppParts) {
   });
   app.use(photoFiles({ photos, storage, log }));
   app.use(feedRoutes({ source: entries.reading, siteUrl: config.SITE_URL, clock }));
+  if (config.FAKES) app.use(mailFakeRoutes(mailFakeFolder(config.UPLOADS_DIR)));
   if (client) {
     const cache = development ? noPageCache : createPageCache(() => readSiteVersion(database), clock);
     const call = inProcessCaller(routes);
@@ -70,6 +74,7 @@ export function createApp({ config, database, log, clock, client }: AppParts) {
     app,
     routes,
     queue,
+    mail,
     async start() {
       await mail.start();
       scheduleCleaning({ queue, clock });
