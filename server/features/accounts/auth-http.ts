@@ -44,6 +44,18 @@ export function serveAuth(auth: Auth): RequestHandler {
   };
 }
 
+/** `POST /sign-out`: the header's form, for a browser without JavaScript. A foreign page's form comes without the cookie. */
+export function signOutForm(auth: Auth): RequestHandler {
+  return async (req, res) => {
+    const { headers } = await auth.api.signOut({
+      headers: fromNodeHeaders(req.headers),
+      returnHeaders: true,
+    });
+    for (const cookie of headers.getSetCookie()) res.append("Set-Cookie", cookie);
+    res.redirect(303, "/");
+  };
+}
+
 /** Sets `req.viewer` from the session cookie; a caller without one costs no look-up. */
 export function sessionMiddleware(auth: Auth): RequestHandler {
   return async (req, res, next) => {
@@ -54,8 +66,7 @@ export function sessionMiddleware(auth: Auth): RequestHandler {
       returnHeaders: true,
     });
     // A session that is extended, or gone, comes with its cookie.
-    const cookies = headers.getSetCookie();
-    if (cookies.length > 0) res.append("Set-Cookie", cookies);
+    for (const cookie of headers.getSetCookie()) res.append("Set-Cookie", cookie);
     if (response) {
       req.viewer = toPerson(response.user);
       req.sessionId = response.session.id;

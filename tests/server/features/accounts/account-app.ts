@@ -10,7 +10,7 @@ import { onTestFinished } from "vitest";
 import { openDatabase } from "#server/db/client.ts";
 import { migrateDatabase } from "#server/db/migrate.ts";
 import { createAuth } from "#server/features/accounts/auth.ts";
-import { serveAuth, sessionMiddleware } from "#server/features/accounts/auth-http.ts";
+import { serveAuth, sessionMiddleware, signOutForm } from "#server/features/accounts/auth-http.ts";
 import { accountRoutes } from "#server/features/accounts/routes.ts";
 import { createAccountService } from "#server/features/accounts/service.ts";
 import { apiRouter } from "#server/http/endpoints.ts";
@@ -52,6 +52,7 @@ export async function startAccountApp({ siteUrl, demoSignIns = () => [] }: Accou
 
   const app = express();
   app.all("/api/auth/{*any}", serveAuth(auth));
+  app.post("/sign-out", signOutForm(auth));
   app.use(sessionMiddleware(auth));
   app.use(apiRouter(accountRoutes(accounts, demoSignIns)));
   app.use(handleErrors(log));

@@ -214,6 +214,19 @@ describe("POST /api/auth/sign-out", () => {
   });
 });
 
+describe("POST /sign-out", () => {
+  it("signs out from a plain form and leads to the front page", async () => {
+    const app = await startAccountApp();
+    const browser = await signedInBrowser(app);
+    const kept = new Map(browser.cookies);
+    const { status, headers } = await browser.send("POST", "/sign-out");
+    expect([status, headers.get("location")]).toEqual([303, "/"]);
+    expect(browser.cookies.size).toBe(0);
+    for (const [name, value] of kept) browser.cookies.set(name, value);
+    expect(await browser.me()).toBeNull();
+  });
+});
+
 describe("POST /api/auth/reset-password", () => {
   it("sets the password once per token, and ends every session", async () => {
     const app = await startAccountApp();
