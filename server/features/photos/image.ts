@@ -31,10 +31,13 @@ export function prepareDecoder(): void {
 
 /** Decodes an uploaded file into a clean photo, or says what is wrong with it. */
 export async function decodeUpload(path: string): Promise<CleanPhoto> {
-  const picture = sharp(path, { failOn: "error", limitInputPixels: photoLimits.pixels });
-  const metadata = await picture.metadata().catch(() => null);
+  // The header is read without the limit, so that the refusal can say how large the picture is.
+  const metadata = await sharp(path, { limitInputPixels: false })
+    .metadata()
+    .catch(() => null);
   if (!metadata) throw (await isHeic(path)) ? heic() : unreadable();
   refuseUnfit(metadata);
+  const picture = sharp(path, { failOn: "error", limitInputPixels: photoLimits.pixels });
   const upright = picture.autoOrient();
   // Transparency is kept; anything else becomes a fine JPEG, small enough to keep for later turns.
   const kept = metadata.hasAlpha ? upright.png() : upright.jpeg({ quality: 92, chromaSubsampling: "4:4:4" });
@@ -103,8 +106,8 @@ function damaged(): AppError {
 /** A few bytes from which a blurred stand-in is drawn, for the photo as turned. */
 export async function makeThumbhash(master: Buffer, rotation: number): Promise<string> {
   const { data, info } = await sharp(master)
-    .resize(100, 100, { fit: "inside" })
     .rotate(rotation)
+    .resize(100, 100, { fit: "inside" })
     .ensureAlpha()
     .raw()
     .toBuffer({ resolveWithObject: true });
@@ -116,10 +119,7 @@ export function makePicture(
   master: Buffer,
   { rotation, width, format }: { rotation: number; width: number; format: PictureFormat },
 ): Promise<Buffer> {
-  const turned = rotation % 180 === 90;
-  const picture = sharp(master)
-    .resize({ ...(turned ? { height: width } : { width }), withoutEnlargement: true })
-    .rotate(rotation);
+  const picture = sharp(master).rotate(rotation).resize({ width, withoutEnlargement: true });
   return encode(picture, format).toBuffer();
 }
 
