@@ -1,4 +1,6 @@
 import type { PhotoView } from "#shared/contracts/photos.ts";
+import { placeholderBackground } from "#src/components/placeholder-background.ts";
+import { StoredPhoto } from "#src/components/stored-photo.tsx";
 
 interface CoverPhotoProps {
   photo: PhotoView | null;
@@ -9,31 +11,15 @@ interface CoverPhotoProps {
 
 /** A cover in a 3:2 frame; while its pictures are being made, the placeholder. */
 export function CoverPhoto({ photo, alt, sizes }: CoverPhotoProps) {
-  const pictures = photo?.webp ?? [];
-  const largest = pictures.at(-1);
-  const background = photo?.placeholder ? { backgroundImage: `url(${photo.placeholder})` } : undefined;
-  if (!largest) {
-    return (
-      <div
-        aria-hidden="true"
-        style={background}
-        className="grid aspect-[3/2] w-full place-content-center rounded bg-grey-wash bg-cover"
-      >
-        {photo ? null : <LayoutCross />}
-      </div>
-    );
-  }
+  if (photo && photo.webp.length > 0) return <StoredPhoto photo={photo} alt={alt} sizes={sizes} crop="3/2" />;
   return (
-    <img
-      src={largest.url}
-      srcSet={pictures.map(({ url, width }) => `${url} ${width}w`).join(", ")}
-      sizes={sizes}
-      alt={alt}
-      style={background}
-      loading="lazy"
-      decoding="async"
-      className="aspect-[3/2] w-full rounded bg-grey-wash bg-cover object-cover"
-    />
+    <div
+      aria-hidden="true"
+      style={photo?.placeholder ? placeholderBackground(photo.placeholder) : undefined}
+      className="grid aspect-[3/2] w-full place-content-center rounded bg-grey-wash"
+    >
+      {photo ? null : <LayoutCross />}
+    </div>
   );
 }
 
