@@ -22,6 +22,8 @@ export interface ResultField {
   unit: string;
   decimals: number;
   meaning: string;
+  /** Heading over a run of rows that belong together; the first rows need none. */
+  section?: string;
 }
 
 /** How a result is worked out, for the reader who wants to check it. */
@@ -53,6 +55,8 @@ export interface CalculatorDefinition<
   compute(inputs: z.output<Schema>): Result<Results, CalculatorIssue>;
   /** A full-size sheet to mark steel with, for those calculators that have one. */
   template?(inputs: z.output<Schema>, results: Results, names: TemplateNames): TemplateSheet;
+  /** What a person does at the bench, one sentence a step; `show` writes a length given in mm. */
+  steps?(inputs: z.output<Schema>, results: Results, show: (millimetres: number) => string): string[];
   resultFields: readonly ResultField[];
   cautions: readonly string[];
   method: Method;

@@ -13,6 +13,8 @@ export interface NumberSpec extends FieldText {
   /** How far one press of an arrow key moves it. */
   step: number;
   decimals: number;
+  /** Rarely changed: the screen folds it away. */
+  minor?: boolean;
 }
 
 export interface ChoiceSpec extends FieldText {

@@ -1,5 +1,6 @@
 import { defineCalculator } from "../definition.ts";
 import { saddleCope as compute } from "./formula.ts";
+import { handMarks } from "./hand-marks.ts";
 import { saddleCopeInputs } from "./inputs.ts";
 import { copeTemplate } from "./template.ts";
 
@@ -25,6 +26,7 @@ export const saddleCope = defineCalculator({
   example: { headerOd: 44.5, branchOd: 38.1, branchWall: 2.5, angle: 60, offset: 0 },
   compute,
   template: copeTemplate,
+  steps: handMarks,
   resultFields: [
     {
       name: "deepest",
@@ -71,6 +73,7 @@ export const saddleCope = defineCalculator({
       meaning: "The most by which the bore is cut deeper than the outside.",
     },
     {
+      section: "Once round",
       name: "templateWidth",
       label: "Wrap length",
       unit: "mm",
@@ -78,6 +81,7 @@ export const saddleCope = defineCalculator({
       meaning: "Once round the branch, with the paper.",
     },
     {
+      section: "Once round",
       name: "weldLength",
       label: "Weld length",
       unit: "mm",
@@ -85,6 +89,7 @@ export const saddleCope = defineCalculator({
       meaning: "Along the outside line, all the way round.",
     },
     {
+      section: "Hole-saw set-up",
       name: "holeSaw.diameter",
       label: "Hole saw",
       unit: "mm",
@@ -92,6 +97,7 @@ export const saddleCope = defineCalculator({
       meaning: "Same diameter as the header.",
     },
     {
+      section: "Hole-saw set-up",
       name: "holeSaw.fromTip",
       label: "Saw centre from squared end",
       unit: "mm",
@@ -99,6 +105,7 @@ export const saddleCope = defineCalculator({
       meaning: "Along the branch axis. Negative: the saw's centre lies beyond the end.",
     },
     {
+      section: "Hole-saw set-up",
       name: "holeSaw.angle",
       label: "Saw to tube",
       unit: "°",
@@ -106,6 +113,7 @@ export const saddleCope = defineCalculator({
       meaning: "Between the saw's axis and the tube's axis.",
     },
     {
+      section: "Hole-saw set-up",
       name: "holeSaw.sideways",
       label: "Saw off centre",
       unit: "mm",

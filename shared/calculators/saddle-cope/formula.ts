@@ -60,7 +60,9 @@ export interface Joint {
 }
 
 /** Takes the inputs into the formula's letters. */
-export function joint(inputs: SaddleCopeInputs): Joint {
+export function joint(
+  inputs: Pick<SaddleCopeInputs, "headerOd" | "branchOd" | "branchWall" | "angle" | "offset">,
+): Joint {
   const radians = inputs.angle * RADIANS;
   return {
     R: inputs.headerOd / 2,
@@ -107,8 +109,8 @@ export function dihedralAt(tube: Joint, around: number): number {
   return 180 - Math.acos(Math.min(1, Math.max(-1, dot))) / RADIANS;
 }
 
-/** Sine and cosine that are exact on the four quarter lines, where people measure. */
-function trig(around: number): { cos: number; sin: number } {
+/** Sine and cosine of an angle in degrees, exact on the four quarter lines, where people measure. */
+export function trig(around: number): { cos: number; sin: number } {
   const quarter = around / 90;
   if (Number.isInteger(quarter)) {
     const turn = ((quarter % 4) + 4) % 4;
@@ -163,12 +165,13 @@ function roughCutNote(allowance: number): string {
   return `Cut the tube ${allowance} mm over its finished length, cope this end, and trim the other end last.`;
 }
 
-function checkJoint({
+/** Says why no such joint can be cut; `undefined` when it can. Lengths in mm. */
+export function checkJoint({
   headerOd,
   branchOd,
   branchWall,
   offset,
-}: SaddleCopeInputs): CalculatorIssue | undefined {
+}: Pick<SaddleCopeInputs, "headerOd" | "branchOd" | "branchWall" | "offset">): CalculatorIssue | undefined {
   const show = (value: number) => `${Number(value.toFixed(3))} mm`;
   if (branchWall >= branchOd / 2) {
     const message = `Branch wall leaves no bore: it must be less than half the branch diameter (${show(branchOd / 2)}).`;
@@ -188,12 +191,20 @@ function checkJoint({
   return undefined;
 }
 
-/** Least value of a line round the tube: a fine walk, then a golden-section search between the neighbours. */
-function lowest(line: (around: number) => number): { around: number; value: number } {
-  const step = 360 / FINE_STEPS;
+/**
+ * Least value of a line round the tube: a walk, then a golden-section search between the neighbours.
+ *
+ * @param steps of the walk: a multiple of four, so that it meets the kinks on the sides
+ * @returns place in degrees and value
+ */
+export function lowest(
+  line: (around: number) => number,
+  steps = FINE_STEPS,
+): { around: number; value: number } {
+  const step = 360 / steps;
   let best = { around: 0, value: line(0) };
-  for (let index = 1; index < FINE_STEPS; index += 1) {
-    const around = (360 * index) / FINE_STEPS;
+  for (let index = 1; index < steps; index += 1) {
+    const around = (360 * index) / steps;
     const value = line(around);
     if (value < best.value - SLACK) best = { around, value };
   }

@@ -56,6 +56,7 @@ export const saddleCopeInputs = z.strictObject({
     max: 3,
     step: 0.05,
     decimals: 2,
+    minor: true,
   }).default(0.1),
   allowance: numberInput({
     label: "Rough-cut allowance",
@@ -65,6 +66,7 @@ export const saddleCopeInputs = z.strictObject({
     max: 500,
     step: 1,
     decimals: 1,
+    minor: true,
   }).default(25),
   samples: countInput({
     label: "Points round the tube",
@@ -73,6 +75,7 @@ export const saddleCopeInputs = z.strictObject({
     min: 8,
     max: 720,
     step: 4,
+    minor: true,
   }).default(72),
 });
 

@@ -1,0 +1,64 @@
+import type { ResultField } from "#shared/calculators/definition.ts";
+import { type LengthUnits, lengthFigure } from "#shared/units/length.ts";
+
+interface SumResultsProps {
+  fields: readonly ResultField[];
+  results: object;
+  units: LengthUnits;
+}
+
+/** A result by its dotted name; `undefined` when this version of the sum did not give it. */
+function resultAt(results: object, name: string): number | undefined {
+  const value = name
+    .split(".")
+    .reduce<unknown>((at, key) => (at as Record<string, unknown> | undefined)?.[key], results);
+  return typeof value === "number" ? value : undefined;
+}
+
+/** A result as shown: figure and unit. */
+export function resultWords({ name, unit, decimals }: ResultField, results: object, units: LengthUnits) {
+  const value = resultAt(results, name);
+  if (value === undefined) return undefined;
+  if (unit === "mm")
+    return { figure: lengthFigure(value, units, decimals), unit: units === "mm" ? "mm" : "in" };
+  return { figure: value.toFixed(decimals), unit };
+}
+
+/** Every number the sum gave, in runs under their headings. */
+export function SumResults({ fields, results, units }: SumResultsProps) {
+  const sections = [...new Set(fields.map((field) => field.section))];
+  const [first, ...others] = sections.map((section) => (
+    <table key={section ?? ""} className="w-full border-collapse text-sm">
+      <caption className="pb-1 text-left font-semibold">{section ?? "Results"}</caption>
+      <tbody>
+        {fields
+          .filter((field) => field.section === section)
+          .map((field) => (
+            <ResultRow key={field.name} field={field} words={resultWords(field, results, units)} />
+          ))}
+      </tbody>
+    </table>
+  ));
+  return (
+    <div className="grid items-start gap-x-8 gap-y-4 @lg:grid-cols-2">
+      {first}
+      {others.length > 0 ? <div className="flex flex-col gap-4">{others}</div> : null}
+    </div>
+  );
+}
+
+function ResultRow({ field, words }: { field: ResultField; words: ReturnType<typeof resultWords> }) {
+  if (!words) return null;
+  return (
+    <tr className="border-t border-hairline">
+      <th scope="row" className="py-1.5 pr-3 text-left align-baseline font-normal">
+        {field.label}
+        <span className="sr-only text-xs text-ink-soft @sm:not-sr-only @sm:block">{field.meaning}</span>
+      </th>
+      <td className="figures py-1.5 text-right align-baseline font-semibold whitespace-nowrap">
+        {words.figure}{" "}
+        <span className="inline-block w-7 text-left font-normal text-ink-soft">{words.unit}</span>
+      </td>
+    </tr>
+  );
+}

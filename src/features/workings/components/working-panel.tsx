@@ -1,0 +1,220 @@
+import { clsx } from "clsx";
+import { type ReactNode, useEffect, useState, useSyncExternalStore } from "react";
+import type { CalculatorDefinition } from "#shared/calculators/definition.ts";
+import { findCalculator } from "#shared/calculators/registry.ts";
+import { formatLength, type LengthUnits } from "#shared/units/length.ts";
+import { Button } from "#src/components/button.tsx";
+import { buttonClass } from "#src/components/button-class.ts";
+import { LiveRegion } from "#src/components/live-region.tsx";
+import { Notice } from "#src/components/notice.tsx";
+import { NumberTag } from "#src/components/number-tag.tsx";
+import { Plate } from "#src/components/plate.tsx";
+import { drawings } from "../drawings.ts";
+import { templateLinks } from "../template-links.ts";
+import { useWorkingSum } from "../use-working-sum.ts";
+import { SolidView } from "./solid-view.tsx";
+import { SumFields } from "./sum-fields.tsx";
+import { SumCautions, SumMethod, SumSteps } from "./sum-method.tsx";
+import { resultWords, SumResults } from "./sum-results.tsx";
+
+export interface PanelWorking {
+  id: string;
+  /** Null until it is kept in a build. */
+  number: number | null;
+  title: string;
+  calculator: string;
+  version: number;
+  inputs: Record<string, unknown>;
+  results: Record<string, unknown>;
+}
+
+export interface WorkingPanelProps {
+  working: PanelWorking;
+  /** `read`: numbers are tried and can be put back. `edit`: they are the builder's own and are handed on. */
+  mode: "read" | "edit";
+  units: LengthUnits;
+  onInputsChange?: (inputs: Record<string, unknown>) => void;
+  /** Where the kept working's templates are; without it they are drawn from the numbers alone. */
+  templateBase?: string;
+  level?: 2 | 3 | 4;
+  /** Small print in the title strip. */
+  aside?: ReactNode;
+}
+
+/** A working as everyone meets it: drawing, inputs, results, cautions, method, template. Complete without JavaScript. */
+export function WorkingPanel(props: WorkingPanelProps) {
+  const definition = findCalculator(props.working.calculator);
+  if (!definition) {
+    return <Notice kind="attention">This working needs a calculator that is no longer here.</Notice>;
+  }
+  return <Panel {...props} definition={definition} />;
+}
+
+function Panel({
+  working,
+  mode,
+  units,
+  onInputsChange,
+  templateBase,
+  level,
+  aside,
+  definition,
+}: WorkingPanelProps & { definition: CalculatorDefinition }) {
+  const sum = useWorkingSum(definition, working, units, onInputsChange);
+  const drawing = drawings[definition.id];
+  const shown = { inputs: sum.shown.inputs, results: sum.shown.results, units };
+  const live = useIsLive();
+  const stale = sum.issue !== null;
+  return (
+    <Plate
+      title={working.title || definition.name}
+      {...(level && { level })}
+      number={working.number === null ? null : <NumberTag>{`W${working.number}`}</NumberTag>}
+      aside={aside ?? definition.name}
+      actions={
+        definition.template ? (
+          <TemplateLinks
+            base={templateBase}
+            definition={definition}
+            inputs={shown.inputs}
+            changed={sum.changed || mode === "edit"}
+            stale={stale}
+          />
+        ) : null
+      }
+    >
+      <div className={clsx("-mx-3 -mt-3 transition-opacity sm:-mx-4 sm:-mt-4", stale && "opacity-45")}>
+        {drawing ? <drawing.flat {...shown} /> : null}
+        {drawing?.solid && live ? <SolidView solid={drawing.solid} {...shown} /> : null}
+      </div>
+      <div className="flex flex-col gap-6">
+        <form
+          className="flex flex-col gap-4"
+          aria-label={`Inputs of ${working.title || definition.name}`}
+          onSubmit={(event) => event.preventDefault()}
+        >
+          <SumFields
+            fields={definition.fields}
+            typed={sum.typed}
+            issue={sum.issue}
+            units={units}
+            onChange={sum.change}
+          />
+          {stale ? (
+            <StaleNotice issue={sum.issue} known={definition.fields.map((field) => field.name)} />
+          ) : null}
+          {mode === "read" && sum.changed ? (
+            <Button onClick={sum.putBack}>Put back the builder's numbers</Button>
+          ) : null}
+        </form>
+        <div className={clsx("flex flex-col gap-4 transition-opacity", stale && "opacity-45")}>
+          <SumResults fields={definition.resultFields} {...shown} />
+        </div>
+      </div>
+      <div>
+        <Steps definition={definition} {...shown} />
+        <SumMethod definition={definition} />
+      </div>
+      <SumCautions cautions={definition.cautions} />
+      <Announcement
+        changed={sum.changed}
+        text={stale ? (sum.issue?.message ?? "") : spoken(definition, shown.results, units)}
+      />
+    </Plate>
+  );
+}
+
+function StaleNotice({
+  issue,
+  known,
+}: {
+  issue: { field: string; message: string } | null;
+  known: string[];
+}) {
+  return (
+    <Notice kind="attention" title="Not worked out">
+      {issue && !known.includes(issue.field)
+        ? issue.message
+        : "The drawing and results are of the last numbers that worked."}
+    </Notice>
+  );
+}
+
+function Steps({
+  definition,
+  inputs,
+  results,
+  units,
+}: {
+  definition: CalculatorDefinition;
+  inputs: Record<string, unknown>;
+  results: object;
+  units: LengthUnits;
+}) {
+  const steps = definition.steps?.(inputs, results, (length) => formatLength(length, units, 1));
+  return steps ? <SumSteps steps={steps} /> : null;
+}
+
+interface TemplateLinksProps {
+  base: string | undefined;
+  definition: CalculatorDefinition;
+  inputs: Record<string, unknown>;
+  changed: boolean;
+  stale: boolean;
+}
+
+function TemplateLinks({ base, definition, inputs, changed, stale }: TemplateLinksProps) {
+  const links = templateLinks(
+    base ?? `/api/calculators/${definition.id}/template`,
+    base && !changed ? {} : inputs,
+  );
+  return (
+    <div className="flex flex-col gap-2">
+      <p className="text-xs text-chalk-soft">
+        {stale
+          ? "Full-size template, from the last numbers that worked:"
+          : "Full-size template with these numbers. Print at 100 % and measure the check bar:"}
+      </p>
+      <div className="flex flex-wrap gap-2">
+        {links.map(({ label, href }, index) => (
+          <a key={label} href={href} className={buttonClass(index === 0 ? "primary" : "plain")}>
+            {label}
+          </a>
+        ))}
+      </div>
+    </div>
+  );
+}
+
+function spoken(definition: CalculatorDefinition, results: object, units: LengthUnits): string {
+  return definition.resultFields
+    .filter((field) => !field.section)
+    .slice(0, 4)
+    .map((field) => {
+      const words = resultWords(field, results, units);
+      return words ? `${field.label} ${words.figure} ${words.unit}` : "";
+    })
+    .join(", ");
+}
+
+/** Says the results once typing has paused; a screen reader would otherwise be talked over at each key. */
+function Announcement({ changed, text }: { changed: boolean; text: string }) {
+  const [said, setSaid] = useState("");
+  useEffect(() => {
+    if (!changed) return;
+    const timer = setTimeout(() => setSaid(text), 700);
+    return () => clearTimeout(timer);
+  }, [changed, text]);
+  return <LiveRegion>{said}</LiveRegion>;
+}
+
+const never = () => () => {};
+
+/** False on the server and until the page has come alive: for what does nothing without JavaScript. */
+function useIsLive(): boolean {
+  return useSyncExternalStore(
+    never,
+    () => true,
+    () => false,
+  );
+}
