@@ -23,7 +23,6 @@ export async function render(
   transport: Transport,
   settings: PageSettings,
 ): Promise<RenderedPage> {
-  await loadIslands();
   const api = createApi(transport);
   const queryClient = createQueryClient();
   const handler = createStaticHandler(routes({ api, queryClient }));
@@ -31,6 +30,7 @@ export async function render(
   if (context instanceof Response) {
     return { kind: "redirect", status: context.status, location: context.headers.get("Location") ?? "/" };
   }
+  await loadIslands();
   const router = createStaticRouter(handler.dataRoutes, context);
   const html = renderToString(
     <StrictMode>

@@ -6,15 +6,15 @@ import { PhotoBlock, PhotoGroupBlock } from "#src/features/reading/components/ph
 import { useEntryMedia, workingAnchor } from "#src/features/reading/entry-media.ts";
 import { Island } from "#src/lib/island.tsx";
 import { useUnits } from "#src/lib/page-settings.ts";
-import { workingPanel } from "./working-island.ts";
+import { workingPanel } from "./working-islands.ts";
 
 /** A working as readers get it: the calculator itself, with the builder's numbers in it. */
-function WorkingBlock({ workingId, calculator, title, inputs }: WorkingAttributes) {
+function WorkingBlock({ workingId }: WorkingAttributes) {
   const working = useEntryMedia().workings[workingId];
   const units = useUnits();
   if (!working) return null;
   const anchor = workingAnchor(working.number);
-  const label = `Working ${working.number}: ${title}`;
+  const label = `Working ${working.number}: ${working.title}`;
   return (
     <MarginRow
       wide
@@ -25,7 +25,11 @@ function WorkingBlock({ workingId, calculator, title, inputs }: WorkingAttribute
       }
     >
       <div id={anchor} className="scroll-mt-6">
-        <Island source={workingPanel} props={{ calculator, title, inputs, units }} />
+        {/* The number stands in the margin. */}
+        <Island
+          source={workingPanel}
+          props={{ working: { ...working, number: null }, mode: "read", units }}
+        />
       </div>
     </MarginRow>
   );

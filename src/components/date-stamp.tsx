@@ -1,9 +1,13 @@
+import { clsx } from "clsx";
+
 type DateStampProps = {
   /** UTC milliseconds. */
   at: number;
   /** UTC milliseconds; with it the distance is given beside the date. Take it from the loader, so that server and browser agree. */
   now?: number;
   withTime?: boolean;
+  /** The distance on a line of its own, where a margin has the room (from `md` up). */
+  stacked?: boolean;
 };
 
 const date = new Intl.DateTimeFormat("en-GB", {
@@ -34,7 +38,7 @@ function distance(at: number, now: number): string {
 }
 
 /** The date in full, the distance beside it. */
-export function DateStamp({ at, now, withTime = false }: DateStampProps) {
+export function DateStamp({ at, now, withTime = false, stacked = false }: DateStampProps) {
   const when = new Date(at);
   return (
     <span>
@@ -42,7 +46,12 @@ export function DateStamp({ at, now, withTime = false }: DateStampProps) {
         {date.format(when)}
         {withTime ? `, ${time.format(when)} UTC` : ""}
       </time>
-      {now === undefined ? null : <span className="text-ink-soft"> · {distance(at, now)}</span>}
+      {now === undefined ? null : (
+        <span className={clsx("text-ink-soft", stacked && "md:block")}>
+          <span className={stacked ? "md:hidden" : undefined}> · </span>
+          {distance(at, now)}
+        </span>
+      )}
     </span>
   );
 }

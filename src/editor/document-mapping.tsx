@@ -8,6 +8,7 @@ import type {
 } from "#shared/document/types.ts";
 import { Caution } from "#src/components/caution.tsx";
 import { SlotsContext } from "./document-slots.ts";
+import { keepUnits } from "./keep-units.ts";
 
 interface NodeProps {
   node: DocumentNode;
@@ -95,7 +96,7 @@ function Link({ mark, children }: MarkProps) {
 /** One component for each node; defined once, since a new function would make React start the block afresh. */
 export const nodeMapping = {
   doc: ({ children }: NodeProps) => children,
-  text: ({ node }: NodeProps) => node.text,
+  text: ({ node }: NodeProps) => keepUnits(node.text ?? ""),
   paragraph: ({ children }: NodeProps) => <p>{children}</p>,
   heading: Heading,
   bulletList: ({ children }: NodeProps) => <ul>{children}</ul>,

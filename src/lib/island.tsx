@@ -6,20 +6,27 @@ export interface IslandSource<Props> {
   loaded: ComponentType<Props> | null;
 }
 
-const waiting: (() => Promise<void>)[] = [];
+const declared: (() => Promise<void>)[] = [];
 
 /** Declares an island beside the dynamic import of its component. */
 export function islandSource<Props>(load: () => Promise<ComponentType<Props>>): IslandSource<Props> {
   const source: IslandSource<Props> = { load, loaded: null };
-  waiting.push(async () => {
-    source.loaded = await load();
+  let loading: Promise<void> | null = null;
+  declared.push(() => {
+    loading ??= load().then((component) => {
+      source.loaded = component;
+    });
+    return loading;
   });
   return source;
 }
 
-/** Fetches the code of every island: the server does this once, so that it can draw them whole. */
+/**
+ * Fetches the code of every island declared so far, so that the server can draw them whole: call it once the
+ * page's own code has come. Requests at the same time wait for the same loading.
+ */
 export async function loadIslands(): Promise<void> {
-  await Promise.all(waiting.splice(0).map((load) => load()));
+  await Promise.all(declared.map((load) => load()));
 }
 
 /** Resolves once the element is on the screen or nearly so; at once when there is nothing to watch. */

@@ -1,4 +1,3 @@
-import type { ReactNode } from "react";
 import { Link } from "react-router";
 import type { EntrySummary } from "#shared/contracts/builds.ts";
 import { DateStamp } from "#src/components/date-stamp.tsx";
@@ -9,21 +8,17 @@ interface EntryRowProps {
   build: string;
   entry: EntrySummary;
   now: number;
-  level?: 3 | 4;
-  /** In a list over several builds: whose entry this is. */
-  from?: ReactNode;
 }
 
-/** An entry in a list: its number in the margin, what it is about, its first photo. */
-export function EntryRow({ build, entry, now, level = 3, from }: EntryRowProps) {
-  const Heading = `h${level}` as const;
+/** An entry in its stage: its number in the margin, what it is about, its first photo. */
+export function EntryRow({ build, entry, now }: EntryRowProps) {
   return (
     <article className="group relative grid grid-cols-[2.25rem_minmax(0,1fr)] gap-x-3 py-5 sm:grid-cols-[2.25rem_minmax(0,1fr)_9rem] sm:gap-x-5">
       <p className="figures pt-0.5 text-right text-lg leading-tight font-medium text-grey" aria-hidden="true">
         {entry.number}
       </p>
       <div className="min-w-0">
-        <Heading className="text-lg">
+        <h4 className="text-lg">
           <Link
             to={paths.entry(build, entry.slug)}
             className="text-ink! no-underline! after:absolute after:inset-0 group-hover:underline!"
@@ -31,10 +26,9 @@ export function EntryRow({ build, entry, now, level = 3, from }: EntryRowProps) 
             <span className="sr-only">{`Entry ${entry.number}: `}</span>
             {entry.title}
           </Link>
-        </Heading>
+        </h4>
         <p className="mt-1 max-w-measure font-serif text-base text-ink-soft">{entry.summary}</p>
         <p className="mt-1.5 text-xs text-ink-soft">
-          {from ? <span className="relative">{from} · </span> : null}
           <DateStamp at={entry.publishedAt} now={now} />
         </p>
       </div>

@@ -29,7 +29,7 @@ export function StageSection({ build, group: { stage, entries }, now }: StageSec
         <ol className="divide-y divide-hairline">
           {entries.map((entry) => (
             <li key={entry.id}>
-              <EntryRow build={build} entry={entry} now={now} level={4} />
+              <EntryRow build={build} entry={entry} now={now} />
             </li>
           ))}
         </ol>

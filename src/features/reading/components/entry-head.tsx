@@ -56,7 +56,7 @@ function HeadNotes({ entry, now }: { entry: EntryPage; now: number }) {
       <Link to={paths.stage(entry.build.slug, entry.stage.id)} className="max-md:hidden">
         {entry.stage.title}
       </Link>
-      <DateStamp at={entry.publishedAt} now={now} />
+      <DateStamp at={entry.publishedAt} now={now} stacked />
       {changed ? (
         <span>
           Changed <DateStamp at={entry.updatedAt} />

@@ -13,10 +13,14 @@ export function SeriesNav({ entry: { build, previous, next } }: { entry: EntryPa
     <nav
       aria-label={`More of ${build.title}`}
       data-chrome
-      className="mt-14 grid border-y border-edge font-sans max-sm:divide-y max-sm:divide-hairline sm:grid-cols-2 sm:divide-x sm:divide-hairline"
+      className="mt-14 grid border-y border-edge font-sans sm:grid-cols-2 sm:divide-x sm:divide-hairline"
     >
       {previous ? (
-        <Link to={paths.entry(build.slug, previous.slug)} rel="prev" className={`${cell} max-sm:order-2`}>
+        <Link
+          to={paths.entry(build.slug, previous.slug)}
+          rel="prev"
+          className={`${cell} max-sm:order-2 max-sm:border-t max-sm:border-hairline`}
+        >
           <span className="flex items-center gap-2 text-xs text-ink-soft">
             <ArrowLeft aria-hidden="true" className="size-4" />
             Before: entry {previous.number}
@@ -24,7 +28,7 @@ export function SeriesNav({ entry: { build, previous, next } }: { entry: EntryPa
           <span className="text-lg font-semibold group-hover:underline">{previous.title}</span>
         </Link>
       ) : (
-        <p className="flex items-center py-4 text-sm text-ink-soft max-sm:order-2 sm:px-5">
+        <p className="flex items-center py-4 text-sm text-ink-soft max-sm:order-2 max-sm:border-t max-sm:border-hairline sm:px-5">
           This is the first entry.
         </p>
       )}
