@@ -23,6 +23,7 @@ export const paths = {
   ownBuild: (build: string) => `/workshop/builds/${build}`,
   entryEditor: (entryId: string) => `/workshop/entries/${entryId}`,
   entryHistory: (entryId: string) => `/workshop/entries/${entryId}/history`,
+  entryPreview: (entryId: string) => `/workshop/entries/${entryId}/preview`,
   atomFeed: () => "/feed.atom",
   jsonFeed: () => "/feed.json",
   kit: () => "/dev/kit",

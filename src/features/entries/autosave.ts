@@ -105,9 +105,15 @@ export class Autosave {
     this.#base = { ...this.#base, version };
   }
 
+  /** Ends the timers; what is under way is still answered. `resume` takes it up again. */
   stop(): void {
     this.#stopped = true;
     clearTimeout(this.#timer);
+  }
+
+  resume(): void {
+    this.#stopped = false;
+    if (this.dirty) this.change(this.#content);
   }
 
   #sendIn(delay: number): void {

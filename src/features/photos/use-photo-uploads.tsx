@@ -4,9 +4,9 @@ import { v4 as uuid } from "uuid";
 import type { PhotoView } from "#shared/contracts/photos.ts";
 import type { DocumentNode } from "#shared/document/types.ts";
 import type { EditorHandle } from "#src/editor/editor-handle.ts";
+import { uploadPhoto } from "#src/lib/upload.ts";
 import { UploadCards } from "./components/upload-cards.tsx";
 import { photoKey } from "./queries.ts";
-import { uploadPhoto } from "./upload-photo.ts";
 import { UploadQueue } from "./upload-queue.ts";
 
 const mostInGroup = 6;
@@ -31,7 +31,7 @@ export function usePhotoUploads(build: string, editor: RefObject<EditorHandle | 
     () =>
       new UploadQueue({
         send: (file, onProgress, signal) =>
-          uploadPhoto({ file, purpose: "entry", build, onProgress, signal }),
+          uploadPhoto({ file, purpose: "entry", buildId: build, onProgress, signal }),
         newId: uuid,
         onDone: ({ place }, photo) => arrive(place, photo),
       }),
