@@ -1,24 +1,15 @@
 import { useMutation } from "@tanstack/react-query";
 import { Button } from "#src/components/button.tsx";
 import { Notice } from "#src/components/notice.tsx";
+import { sendVerification } from "#src/features/accounts/auth-client.ts";
 import { useHydrated } from "#src/lib/use-hydrated.ts";
 import { useViewer } from "#src/lib/viewer.ts";
-
-async function sendAgain(email: string): Promise<void> {
-  const response = await fetch("/api/auth/send-verification-email", {
-    method: "POST",
-    headers: { "Content-Type": "application/json" },
-    body: JSON.stringify({ email }),
-  }).catch(() => null);
-  if (response?.status === 429) throw new Error("Enough letters for now. Wait a minute, then ask again.");
-  if (!response?.ok) throw new Error("The letter could not be sent. Check the connection and try again.");
-}
 
 /** Says that the e-mail address comes first, and sends the letter again. */
 export function ConfirmAddress({ before }: { before: string }) {
   const hydrated = useHydrated();
   const viewer = useViewer();
-  const resend = useMutation({ mutationFn: sendAgain });
+  const resend = useMutation({ mutationFn: sendVerification });
   if (!viewer) return null;
   return (
     <div className="flex max-w-measure flex-col gap-3">

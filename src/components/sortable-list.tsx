@@ -1,4 +1,5 @@
 import {
+  type Announcements,
   closestCenter,
   DndContext,
   type DragEndEvent,
@@ -45,7 +46,13 @@ export function SortableList({ label, items, onReorder }: SortableListProps) {
     if (over) move(ids.indexOf(String(active.id)), ids.indexOf(String(over.id)));
   };
   return (
-    <DndContext id={contextId} sensors={sensors} collisionDetection={closestCenter} onDragEnd={handleDragEnd}>
+    <DndContext
+      id={contextId}
+      sensors={sensors}
+      collisionDetection={closestCenter}
+      accessibility={{ announcements: announcementsFor(items), screenReaderInstructions: instructions }}
+      onDragEnd={handleDragEnd}
+    >
       <SortableContext items={ids} strategy={verticalListSortingStrategy}>
         <ol aria-label={label} className="border-t border-hairline">
           {items.map((item, index) => (
@@ -61,6 +68,25 @@ export function SortableList({ label, items, onReorder }: SortableListProps) {
       </SortableContext>
     </DndContext>
   );
+}
+
+const instructions = {
+  draggable:
+    "Press space to pick up, the up and down arrows to move, space to put down, escape to leave it where it was.",
+};
+
+/** What a screen reader hears while an item moves: its name and place, not its id. */
+function announcementsFor(items: SortableItem[]): Announcements {
+  const place = (id: string | number) => items.findIndex((item) => item.id === id) + 1;
+  const name = (id: string | number) => items[place(id) - 1]?.label ?? "It";
+  const at = (id: string | number) => `place ${place(id)} of ${items.length}`;
+  return {
+    onDragStart: ({ active }) => `${name(active.id)} is picked up at ${at(active.id)}.`,
+    onDragOver: ({ active, over }) => (over ? `${name(active.id)} is over ${at(over.id)}.` : undefined),
+    onDragEnd: ({ active, over }) =>
+      over ? `${name(active.id)} is put down at ${at(over.id)}.` : `${name(active.id)} is where it was.`,
+    onDragCancel: ({ active }) => `${name(active.id)} is where it was.`,
+  };
 }
 
 type SortableRowProps = {

@@ -1,8 +1,10 @@
+import { useQuery } from "@tanstack/react-query";
 import type { LoaderFunctionArgs } from "react-router";
 import { LinkButton } from "#src/components/link-button.tsx";
 import { PageHeading } from "#src/components/page-heading.tsx";
 import { OwnBuilds } from "#src/features/builds/components/own-builds.tsx";
 import { ownBuildsQuery } from "#src/features/builds/queries.ts";
+import { useApi } from "#src/lib/api.ts";
 import { paths } from "#src/lib/paths.ts";
 import { useViewer } from "#src/lib/viewer.ts";
 import { ConfirmAddress } from "../confirm-address.tsx";
@@ -17,6 +19,8 @@ export async function load(context: LoadContext, { request }: LoaderFunctionArgs
 export function Component() {
   const viewer = useViewer();
   const mayStart = viewer?.emailVerified === true;
+  // While there is no build, the empty list itself says how to begin.
+  const hasBuilds = (useQuery(ownBuildsQuery(useApi())).data?.builds.length ?? 0) > 0;
   return (
     <div className="page-width py-10">
       <title>Workshop · Soapstone</title>
@@ -25,7 +29,7 @@ export function Component() {
         title="Workshop"
         purpose="Your builds, what is still a draft and what goes public next."
         actions={
-          mayStart ? (
+          mayStart && hasBuilds ? (
             <LinkButton to={paths.newBuild()} tone="primary">
               Start a build
             </LinkButton>

@@ -35,8 +35,3 @@ export function countStates(entries: WorkshopEntry[]): Record<EntryState, number
   for (const { state } of entries) counts[state] += 1;
   return counts;
 }
-
-/** Reads the state asked for in an address; anything else means all of them. */
-export function readState(text: string | null): EntryState | null {
-  return stateOrder.find((state) => state === text) ?? null;
-}

@@ -23,22 +23,16 @@ export function AddStageForm({ slug, onAdded }: { slug: string; onAdded: (title:
   });
   const { title, root } = formState.errors;
   return (
-    <form onSubmit={submit} noValidate className="flex flex-wrap items-start gap-2">
+    <form onSubmit={submit} noValidate className="flex flex-col items-start gap-3">
       <TextField
         label="A new stage"
         help="A part of the build, such as the front suspension."
         autoComplete="off"
-        frameClassName="min-w-56 flex-1"
+        frameClassName="w-full"
         error={title?.message ?? root?.message}
         {...register("title", stageTitleRules)}
       />
-      <Button
-        type="submit"
-        disabled={!hydrated}
-        busy={add.isPending}
-        busyLabel="Adding…"
-        className="mt-[3.4rem] max-sm:mt-0 max-sm:w-full"
-      >
+      <Button type="submit" disabled={!hydrated} busy={add.isPending} busyLabel="Adding…">
         Add the stage
       </Button>
     </form>

@@ -16,14 +16,12 @@ export function StageList({ build: { slug, stages } }: { build: WorkshopBuild })
   const [said, setSaid] = useState("");
   const list = useRef<HTMLDivElement>(null);
   const order = useOrderStages(slug);
-  const reorder = (ids: string[]) => {
-    const moved = ids.findIndex((id, place) => id !== stages[place]?.id);
+  const reorder = (ids: string[]) =>
     order.mutate(ids, {
-      onSuccess: () => setSaid(`The order is saved. Place ${moved + 1} has changed.`),
+      onSuccess: () => setSaid("The new order is saved."),
       onError: (error) =>
         toasts.show({ kind: "error", message: `The order is as it was. ${messageOf(error)}` }),
     });
-  };
   const handleDeleted = (title: string) => {
     setSaid(`${title} is deleted.`);
     list.current?.focus();
@@ -43,7 +41,7 @@ export function StageList({ build: { slug, stages } }: { build: WorkshopBuild })
             id: stage.id,
             label: stage.title,
             content: (
-              <div className="flex flex-wrap items-center justify-between gap-x-2">
+              <div className="flex items-center justify-between gap-x-2 max-sm:flex-col max-sm:items-start">
                 <div className="flex min-w-0 flex-col items-start gap-1">
                   <p className="max-w-full font-semibold leading-tight">{stage.title}</p>
                   <StateTag state={stageStateWords[stage.state]} />
