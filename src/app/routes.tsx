@@ -36,6 +36,8 @@ export function routes(context: LoadContext): RouteObject[] {
             page(context, "/verify-email", "verify-email"),
             page(context, "/account", "account"),
             page(context, "/workshop/entries/:entry", "entry-editor"),
+            page(context, "/workshop/entries/:entry/history", "entry-history"),
+            page(context, "/workshop/entries/:entry/preview", "entry-preview"),
             page(context, "/dev/kit", "dev-kit"),
             page(context, "*", "not-found"),
           ],

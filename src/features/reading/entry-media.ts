@@ -11,7 +11,11 @@ export interface EntryMedia {
   photoNumbers: Map<string, number>;
 }
 
-export function entryMedia({ document, photos, workings }: EntryPage): EntryMedia {
+export function entryMedia({
+  document,
+  photos,
+  workings,
+}: Pick<EntryPage, "document" | "photos" | "workings">): EntryMedia {
   const ids = [...new Set(photosIn(document).map((photo) => photo.photoId))];
   return { photos, workings, photoNumbers: new Map(ids.map((id, index) => [id, index + 1])) };
 }

@@ -1,5 +1,6 @@
 import { useQuery } from "@tanstack/react-query";
-import { type ReactNode, type RefObject, useState } from "react";
+import { type MouseEvent, type ReactNode, type RefObject, useState } from "react";
+import { useNavigate } from "react-router";
 import type { EntryDraft } from "#shared/contracts/entries.ts";
 import type { RichDocument } from "#shared/document/types.ts";
 import { Breadcrumbs } from "#src/components/breadcrumbs.tsx";
@@ -39,6 +40,12 @@ export function EntryEditor({ opened, editor, renderText, onCopied, onDeleted }:
   const refused = state.kind === "refused" ? state.fields : {};
   const errors = { ...publishing.fields, ...refused };
   const [initial] = useState(content.document);
+  const navigate = useNavigate();
+  /** The preview shows what is saved, so that comes first. */
+  const preview = (event: MouseEvent) => {
+    event.preventDefault();
+    void autosave.flush().then(() => navigate(paths.entryPreview(draft.id)));
+  };
   return (
     <div className="page-width pb-28 lg:pb-16">
       <title>{`${content.title.trim() || "Untitled entry"}: writing · Soapstone`}</title>
@@ -55,7 +62,7 @@ export function EntryEditor({ opened, editor, renderText, onCopied, onDeleted }:
       <div className="editor-bar">
         <SaveWords state={state} onRetry={() => void autosave.flush()} />
         <div className="flex gap-2">
-          <LinkButton to={paths.entryPreview(draft.id)} onClick={() => void autosave.flush()}>
+          <LinkButton to={paths.entryPreview(draft.id)} onClick={preview}>
             Preview
           </LinkButton>
           {publishing.canPublish ? (
