@@ -3,7 +3,7 @@ import type { AddressInfo } from "node:net";
 import { tmpdir } from "node:os";
 import { join } from "node:path";
 import express from "express";
-import { pino } from "pino";
+import { type Logger, pino } from "pino";
 import { v7 as uuid } from "uuid";
 import { onTestFinished } from "vitest";
 import { type Database, openDatabase } from "#server/db/client.ts";
@@ -45,7 +45,7 @@ export async function contentBench() {
   const folder = mkdtempSync(join(tmpdir(), "soapstone-"));
   const time = { now: Date.UTC(2026, 4, 4, 9) };
   const clock = () => time.now;
-  const log = pino({ level: "silent" });
+  const log: Logger = pino({ level: "silent" });
   const database = openDatabase(":memory:");
   migrateDatabase(database);
   const people = new Map<string, Person>();
@@ -127,12 +127,7 @@ export async function contentBench() {
   };
 }
 
-function startServices(parts: {
-  database: Database;
-  clock: () => number;
-  log: ReturnType<typeof pino>;
-  folder: string;
-}) {
+function startServices(parts: { database: Database; clock: () => number; log: Logger; folder: string }) {
   const { database, clock, log, folder } = parts;
   const queue = createQueue({ database, log, clock });
   const storage = createLocalStorage(folder);

@@ -40,7 +40,7 @@ export async function decodeUpload(path: string): Promise<CleanPhoto> {
   const picture = sharp(path, { failOn: "error", limitInputPixels: photoLimits.pixels });
   const upright = picture.autoOrient();
   // Transparency is kept; anything else becomes a fine JPEG, small enough to keep for later turns.
-  const kept = metadata.hasAlpha ? upright.png() : upright.jpeg({ quality: 92, chromaSubsampling: "4:4:4" });
+  const kept = metadata.hasAlpha ? upright.png() : upright.jpeg({ quality: 92 });
   try {
     const { data, info } = await kept.toBuffer({ resolveWithObject: true });
     return { master: data, width: info.width, height: info.height };
@@ -114,13 +114,33 @@ export async function makeThumbhash(master: Buffer, rotation: number): Promise<s
   return Buffer.from(rgbaToThumbHash(info.width, info.height, data)).toString("base64");
 }
 
-/** One picture of a photo, turned, `width` pixels wide; never larger than the photo. */
-export function makePicture(
+/** Pixels of a photo, turned and at the largest width that is made of it: decoded once for all its pictures. */
+export interface Pixels {
+  data: Buffer;
+  raw: { width: number; height: number; channels: 1 | 2 | 3 | 4 };
+}
+
+/** Never larger than the photo. */
+export async function decodeMaster(
   master: Buffer,
-  { rotation, width, format }: { rotation: number; width: number; format: PictureFormat },
+  { rotation, width }: { rotation: number; width: number },
+): Promise<Pixels> {
+  const { data, info } = await sharp(master)
+    .rotate(rotation)
+    .resize({ width, withoutEnlargement: true })
+    .toColourspace("srgb")
+    .raw()
+    .toBuffer({ resolveWithObject: true });
+  return { data, raw: { width: info.width, height: info.height, channels: info.channels } };
+}
+
+/** One picture of a photo, `width` pixels wide. */
+export function makePicture(
+  { data, raw }: Pixels,
+  { width, format }: { width: number; format: PictureFormat },
 ): Promise<Buffer> {
-  const picture = sharp(master).rotate(rotation).resize({ width, withoutEnlargement: true });
-  return encode(picture, format).toBuffer();
+  const picture = sharp(data, { raw });
+  return encode(raw.width > width ? picture.resize({ width }) : picture, format).toBuffer();
 }
 
 function encode(picture: Sharp, format: PictureFormat): Sharp {

@@ -1,6 +1,6 @@
 import { setImmediate as nextTurn } from "node:timers/promises";
 import { z } from "zod";
-import { makePicture, type PictureFormat } from "./image.ts";
+import { decodeMaster, makePicture, type PictureFormat } from "./image.ts";
 import { createOneAtATime } from "./one-at-a-time.ts";
 import { deletePhotoRow, findPhoto, findUnusedBefore, updatePhotoTurned } from "./repository.ts";
 import type { PhotoParts } from "./service.ts";
@@ -47,9 +47,11 @@ export function registerPhotoJobs(parts: PhotoParts & { incoming: Incoming }): v
     const photo = findPhoto(database, id);
     if (photo?.rotation !== rotation) return null;
     const master = await storage.read(masterKey(id));
+    const widths = widthsFor(photo.width);
+    const pixels = await inTurn(() => decodeMaster(master, { rotation, width: Math.max(...widths) }));
     const done: number[] = [];
-    for (const width of widthsFor(photo.width)) {
-      const bytes = await inTurn(() => makePicture(master, { rotation, width, format }));
+    for (const width of widths) {
+      const bytes = await inTurn(() => makePicture(pixels, { width, format }));
       await storage.write(pictureKey(id, pictureFile(rotation, width, format)), bytes);
       done.push(width);
       progress(done);
