@@ -1,6 +1,6 @@
 import { fail, ok, type Result } from "#shared/result.ts";
 import type { CalculatorIssue } from "../definition.ts";
-import { handMarks } from "./hand-marks.ts";
+import { handMarks, roughCutNote } from "./hand-marks.ts";
 import type { SaddleCopeInputs } from "./inputs.ts";
 
 /** One place round the branch. Angles in degrees, depths in mm from the squared end. */
@@ -42,6 +42,9 @@ const RADIANS = Math.PI / 180;
 
 /** Steps of the fine searches, which do not depend on `samples`; a multiple of four meets the sides exactly. */
 const FINE_STEPS = 3600;
+
+/** Steps of the walk before a golden-section search, which brings the rest. */
+const SEARCH_STEPS = 720;
 
 /**
  * Slack for decimal fractions that binary numbers cannot hold (12.7 + 6.35 against 19.05), in mm.
@@ -133,8 +136,8 @@ export function saddleCope(inputs: SaddleCopeInputs): Result<SaddleCopeResults, 
   const tube = joint(inputs);
   const outside = (around: number) => distanceFromAxis(tube, tube.r, around);
   const bore = (around: number) => distanceFromAxis(tube, tube.bore, around);
-  const tip = lowest(outside).value;
-  const deep = lowest((around) => -outside(around));
+  const tip = lowest(outside, SEARCH_STEPS).value;
+  const deep = lowest((around) => -outside(around), SEARCH_STEPS);
   const numbers = {
     curve: Array.from({ length: inputs.samples + 1 }, (_, step) => {
       const around = (360 * step) / inputs.samples;
@@ -154,15 +157,10 @@ export function saddleCope(inputs: SaddleCopeInputs): Result<SaddleCopeResults, 
     templateWidth: Math.PI * (inputs.branchOd + inputs.paperThickness),
     holeSaw: { diameter: inputs.headerOd, fromTip: 0 - tip, angle: inputs.angle, sideways: inputs.offset },
     weldLength: lengthInSpace(outside, tube.r),
-    insideRelief: -lowest((around) => outside(around) - bore(around)).value,
-    roughCut: roughCutNote(inputs.allowance),
+    insideRelief: -lowest((around) => outside(around) - bore(around), SEARCH_STEPS).value,
+    roughCut: roughCutNote(inputs),
   };
   return ok({ ...numbers, handMarks: handMarks(inputs, numbers) });
-}
-
-function roughCutNote(allowance: number): string {
-  if (allowance === 0) return "No spare length: the tube is cut to its finished length before the cope.";
-  return `Cut the tube ${allowance} mm over its finished length, cope this end, and trim the other end last.`;
 }
 
 /** Says why no such joint can be cut; `undefined` when it can. Lengths in mm. */
@@ -233,7 +231,8 @@ function lengthInSpace(line: (around: number) => number, radius: number): number
   let previous = line(0);
   for (let index = 1; index <= FINE_STEPS; index += 1) {
     const next = line((360 * index) / FINE_STEPS);
-    length += Math.hypot(next - previous, arc);
+    // Math.hypot takes several times as long, and guards against sizes that do not come up here.
+    length += Math.sqrt((next - previous) ** 2 + arc * arc);
     previous = next;
   }
   return length;

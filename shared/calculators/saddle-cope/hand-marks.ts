@@ -10,6 +10,15 @@ interface MarkedNumbers {
 
 const millimetres = (length: number) => `${Number(length.toFixed(1))} mm`;
 
+/** How long to cut the tube before its end is coped; `show` as in `handMarks`. */
+export function roughCutNote(
+  { allowance }: SaddleCopeInputs,
+  show: (length: number) => string = millimetres,
+): string {
+  if (allowance === 0) return "No spare length: the tube is cut to its finished length before the cope.";
+  return `Cut the tube ${show(allowance)} over its finished length, cope this end, and trim the other end last.`;
+}
+
 /**
  * The steps for marking the cope by hand with a square, a marker and an offcut of the header.
  *
@@ -23,6 +32,7 @@ export function handMarks(
   const { heelDepth, toeDepth, sideDepth } = numbers;
   const quarter = show((Math.PI * inputs.branchOd) / 4);
   return [
+    roughCutNote(inputs, show),
     "Cut the branch end square. Check it with the square from two sides.",
     `Draw a line along the tube: this is the heel. Round the tube, mark three more lines ${quarter} apart. Looking at the end, counter-clockwise from the heel: 90° side, toe, 270° side.`,
     `From the squared end, mark the depth on each line: heel ${show(heelDepth)}, 90° side ${show(sideDepth.at90)}, toe ${show(toeDepth)}, 270° side ${show(sideDepth.at270)}.`,

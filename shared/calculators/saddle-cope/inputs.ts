@@ -24,7 +24,7 @@ export const saddleCopeInputs = z.strictObject({
   branchWall: numberInput({
     label: "Branch wall",
     unit: "mm",
-    help: "Wall thickness of the tube whose end is cut.",
+    help: "Of the branch tube.",
     min: 0.2,
     max: 200,
     step: 0.1,
@@ -33,7 +33,7 @@ export const saddleCopeInputs = z.strictObject({
   angle: numberInput({
     label: "Angle between the axes",
     unit: "°",
-    help: "90 is square. The heel is on the acute side.",
+    help: "90 is square.",
     min: 15,
     max: 90,
     step: 0.5,
@@ -42,7 +42,7 @@ export const saddleCopeInputs = z.strictObject({
   offset: numberInput({
     label: "Offset",
     unit: "mm",
-    help: "How far the branch axis passes clear of the header axis. Positive toward the 90° side.",
+    help: "Axes apart; + toward 90° side.",
     min: -1000,
     max: 1000,
     step: 0.5,
@@ -51,7 +51,7 @@ export const saddleCopeInputs = z.strictObject({
   paperThickness: numberInput({
     label: "Paper thickness",
     unit: "mm",
-    help: "Makes the wrap a touch longer, so that it meets. Office paper is about 0.1.",
+    help: "Office paper is about 0.1.",
     min: 0,
     max: 3,
     step: 0.05,
@@ -61,7 +61,7 @@ export const saddleCopeInputs = z.strictObject({
   allowance: numberInput({
     label: "Rough-cut allowance",
     unit: "mm",
-    help: "Spare length to leave before the cope is cut. About an inch is common practice.",
+    help: "About an inch is usual.",
     min: 0,
     max: 500,
     step: 1,
@@ -71,7 +71,7 @@ export const saddleCopeInputs = z.strictObject({
   samples: countInput({
     label: "Points round the tube",
     unit: "",
-    help: "How many steps the listed curve has. It does not move the other numbers.",
+    help: "Of the listed curve only.",
     min: 8,
     max: 720,
     step: 4,

@@ -19,7 +19,7 @@ export function headerGeometry({ headerOd, branchOd, angle }: SaddleCopeInputs):
 /** The coped branch in place, mm: outside, bore, the cut face between them and the far end. */
 export function branchGeometry(inputs: SaddleCopeInputs, results: SaddleCopeResults): BufferGeometry {
   const tube = joint(inputs);
-  const far = results.tipFromAxis + results.deepest + 2.2 * inputs.branchOd;
+  const far = results.tipFromAxis + results.deepest + 1.5 * inputs.branchOd;
   const rings = [
     ring((around) => place(tube, tube.r, around, distanceFromAxis(tube, tube.r, around))),
     ring((around) => place(tube, tube.r, around, far)),

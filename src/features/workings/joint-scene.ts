@@ -29,7 +29,7 @@ export function openJointScene(canvas: HTMLCanvasElement): JointScene | null {
   if (!renderer) return null;
   const scene = new Scene();
   const camera = new PerspectiveCamera(32, 4 / 3, 0.1, 100);
-  camera.position.set(2.6, 1.9, 5.2);
+  camera.position.set(3, 2.6, 6.6);
   const sun = new DirectionalLight(0xffffff, 2.2);
   sun.position.set(3, 6, 4);
   const joint = new Group();
@@ -53,7 +53,7 @@ export function openJointScene(canvas: HTMLCanvasElement): JointScene | null {
     show(inputs, results) {
       empty(joint);
       fill(joint, inputs, results);
-      controls.target.set(0, 0.45, 0);
+      controls.target.set(0.25, 0.7, 0);
       controls.update();
       draw();
     },

@@ -110,7 +110,7 @@ function planSideView(tube: Joint, results: SaddleCopeResults) {
   const up = (s: number, n: number) => s * tube.sin - n * tube.cos;
   const reach = {
     left: Math.min(across(toe, -tube.r), across(0, 0)) - 0.9 * tube.R,
-    right: Math.max(across(heel, tube.r), across(length, 0) * 0.9) + 0.7 * tube.R,
+    right: Math.max(across(heel, tube.r), across(length, 0) * 0.9) + 1.2 * tube.R,
   };
   const ends = {
     left: Math.min(reach.left, across(length, -tube.r)),
@@ -190,7 +190,7 @@ function breakLine([x1, y1]: Spot, [x2, y2]: Spot): string {
 
 function AngleArc({ plan, angle }: { plan: Plan; angle: number }) {
   const { tube, flat, scale } = plan;
-  const radius = Math.min(plan.length * 0.92, plan.reach.right - 4 / scale);
+  const radius = Math.min(plan.length * 0.84, plan.reach.right - 4 / scale);
   const spot = (degrees: number, out = 0): Spot => {
     const radians = (degrees * Math.PI) / 180;
     return flat((radius + out) * Math.cos(radians), (radius + out) * Math.sin(radians));

@@ -36,7 +36,7 @@ export function SumFields(props: SumFieldsProps) {
 
 function FieldGrid({ numbers, typed, issue, units, onChange }: SumFieldsProps & { numbers: NumberFields }) {
   return (
-    <div className="grid items-end gap-4 @sm:grid-cols-2 @xl:grid-cols-3">
+    <div className="grid items-start gap-4 @sm:grid-cols-2 @xl:grid-cols-3">
       {numbers.map((field) => (
         <TextField
           key={field.name}

@@ -42,11 +42,10 @@ export function SumCautions({ cautions }: { cautions: readonly string[] }) {
 }
 
 /** What to do at the bench, with the numbers in it. */
-export function SumSteps({ steps, rough }: { steps: readonly string[]; rough?: string }) {
+export function SumSteps({ steps }: { steps: readonly string[] }) {
   return (
     <Disclosure summary="Mark it by hand">
       <ol className="flex max-w-measure list-decimal flex-col gap-2 pl-5">
-        {rough ? <li>{rough}</li> : null}
         {steps.map((step) => (
           <li key={step}>{step}</li>
         ))}

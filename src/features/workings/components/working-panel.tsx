@@ -4,18 +4,17 @@ import type { CalculatorDefinition } from "#shared/calculators/definition.ts";
 import { findCalculator } from "#shared/calculators/registry.ts";
 import { formatLength, type LengthUnits } from "#shared/units/length.ts";
 import { Button } from "#src/components/button.tsx";
-import { buttonClass } from "#src/components/button-class.ts";
 import { LiveRegion } from "#src/components/live-region.tsx";
 import { Notice } from "#src/components/notice.tsx";
 import { NumberTag } from "#src/components/number-tag.tsx";
 import { Plate } from "#src/components/plate.tsx";
 import { drawings } from "../drawings.ts";
-import { templateLinks } from "../template-links.ts";
 import { useWorkingSum } from "../use-working-sum.ts";
 import { SolidView } from "./solid-view.tsx";
 import { SumFields } from "./sum-fields.tsx";
 import { SumCautions, SumMethod, SumSteps } from "./sum-method.tsx";
 import { resultWords, SumResults } from "./sum-results.tsx";
+import { TemplateLinks } from "./template-links.tsx";
 
 export interface PanelWorking {
   id: string;
@@ -76,7 +75,7 @@ function Panel({
           <TemplateLinks
             base={templateBase}
             definition={definition}
-            inputs={shown.inputs}
+            {...shown}
             changed={sum.changed || mode === "edit"}
             stale={stale}
           />
@@ -153,37 +152,6 @@ function Steps({
 }) {
   const steps = definition.steps?.(inputs, results, (length) => formatLength(length, units, 1));
   return steps ? <SumSteps steps={steps} /> : null;
-}
-
-interface TemplateLinksProps {
-  base: string | undefined;
-  definition: CalculatorDefinition;
-  inputs: Record<string, unknown>;
-  changed: boolean;
-  stale: boolean;
-}
-
-function TemplateLinks({ base, definition, inputs, changed, stale }: TemplateLinksProps) {
-  const links = templateLinks(
-    base ?? `/api/calculators/${definition.id}/template`,
-    base && !changed ? {} : inputs,
-  );
-  return (
-    <div className="flex flex-col gap-2">
-      <p className="text-xs text-chalk-soft">
-        {stale
-          ? "Full-size template, from the last numbers that worked:"
-          : "Full-size template with these numbers. Print at 100 % and measure the check bar:"}
-      </p>
-      <div className="flex flex-wrap gap-2">
-        {links.map(({ label, href }, index) => (
-          <a key={label} href={href} className={buttonClass(index === 0 ? "primary" : "plain")}>
-            {label}
-          </a>
-        ))}
-      </div>
-    </div>
-  );
 }
 
 function spoken(definition: CalculatorDefinition, results: object, units: LengthUnits): string {
