@@ -7,7 +7,7 @@ const styles = `
 @media (prefers-color-scheme: dark) { :root { --paper: #14181a; --sheet: #1c2224; --ink: #e8e7e0; --soft: #aab2b5; --line: #343c40; --link: #86bae4; --plate: #0f1518; } }
 * { box-sizing: border-box; }
 body { margin: 0; background: var(--paper); color: var(--ink); font: 17px/1.5 Archivo, "Segoe UI", Roboto, Helvetica, Arial, sans-serif; }
-header { background: var(--plate); color: #ecebe2; padding: 18px max(16px, calc(50vw - 30rem)); }
+header { background: var(--plate); color: #ecebe2; padding: 18px max(16px, calc(50vw - 29rem)); }
 header p { margin: 0; }
 header .name { font-weight: 700; font-size: 20px; }
 header .what { color: #b3bec3; font-size: 15px; }

@@ -28,6 +28,8 @@ export function mailFakeRoutes(folder: string): Router {
   router.get("/dev/mail/:id/html", async (req, res) => {
     const letter = await readLetter(folder, req.params.id);
     if (!letter) res.status(404);
+    // The sandbox makes the letter an origin of its own, which this header of the site's would contradict.
+    res.removeHeader("Origin-Agent-Cluster");
     send(res, letter?.html ?? noSuchLetterPage(), letterPolicy);
   });
   return router;

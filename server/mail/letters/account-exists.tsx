@@ -7,7 +7,7 @@ export function AccountExists({ name, link, resetLink }: LetterOf<"account_exist
     <LetterFrame title="You already have an account" preview="Someone tried to sign up with your address.">
       <Paragraph>Hello {name},</Paragraph>
       <Paragraph>
-        someone tried to open a new account with this address. You have one already, so nothing was changed.
+        Someone tried to open a new account with this address. You have one already, so nothing was changed.
         If it was you, sign in as usual.
       </Paragraph>
       <Act href={link}>Sign in</Act>

@@ -7,7 +7,7 @@ export function ConfirmNewAddress({ name, newEmail, link }: LetterOf<"confirm_ne
     <LetterFrame title="Confirm your new address" preview="The change is made when you confirm it.">
       <Paragraph>Hello {name},</Paragraph>
       <Paragraph>
-        you asked to change the address of your account to {newEmail}. Nothing changes until you confirm it
+        You asked to change the address of your account to {newEmail}. Nothing changes until you confirm it
         here. From then on you sign in with the new address.
       </Paragraph>
       <Act href={link}>Confirm the new address</Act>
@@ -24,7 +24,7 @@ export function AddressChangeAsked({ name, newEmail, link }: LetterOf<"address_c
     <LetterFrame title="Your address is to be changed" preview="Was this you?">
       <Paragraph>Hello {name},</Paragraph>
       <Paragraph>
-        someone who knows your password asked to change the address of your account to {newEmail}. It changes
+        Someone who knows your password asked to change the address of your account to {newEmail}. It changes
         once that address has been confirmed. If this was you, there is nothing to do here.
       </Paragraph>
       <Paragraph>If it was not you, set a new password now: that also stops the change.</Paragraph>

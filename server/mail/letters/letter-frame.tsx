@@ -31,7 +31,11 @@ export function LetterFrame({ title, preview, children }: LetterFrameProps) {
             <tr>
               <td style={style.head}>
                 <p style={style.name}>Soapstone</p>
-                <div aria-hidden="true" style={{ marginTop: "10px", height: "12px", lineHeight: 0 }}>
+                <div
+                  aria-hidden="true"
+                  data-skip-in-text="true"
+                  style={{ marginTop: "10px", height: "12px", lineHeight: 0 }}
+                >
                   {ticks.map(({ place, tall }) => (
                     <span key={place} style={tick(tall)} />
                   ))}

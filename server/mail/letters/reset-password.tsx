@@ -6,7 +6,7 @@ export function ResetPassword({ name, link }: LetterOf<"reset_password">) {
     <LetterFrame title="Set a new password" preview="The link works once, for one hour.">
       <Paragraph>Hello {name},</Paragraph>
       <Paragraph>
-        here is the link to set a new password. It works once, for one hour. Setting the password signs you
+        Here is the link to set a new password. It works once, for one hour. Setting the password signs you
         out on every device.
       </Paragraph>
       <Act href={link}>Set a new password</Act>

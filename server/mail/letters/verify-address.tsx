@@ -6,7 +6,7 @@ export function VerifyAddress({ name, link }: LetterOf<"verify_address">) {
     <LetterFrame title="Confirm your address" preview="One press, and you can publish.">
       <Paragraph>Hello {name},</Paragraph>
       <Paragraph>
-        someone, we hope you, opened an account with this address. Confirm it, so that you can publish a build
+        Someone, we hope you, opened an account with this address. Confirm it, so that you can publish a build
         and get back in should you forget your password.
       </Paragraph>
       <Act href={link}>Confirm this address</Act>

@@ -39,10 +39,9 @@ export function ResetPassword({ token }: { token: string | null }) {
       ) : null}
       {!done && token ? <ResetForm token={token} onDone={() => setDone(true)} /> : null}
       {!done && !token ? (
-        <FormNotice
-          message="The link is not whole. Open it from the letter, or ask for a new one."
-          actions={askAgain}
-        />
+        <Notice kind="error" title="The link is not whole" actions={askAgain}>
+          Open it from the letter, or ask for a new one.
+        </Notice>
       ) : null}
     </AuthFrame>
   );

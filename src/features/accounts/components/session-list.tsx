@@ -79,13 +79,14 @@ function SessionItem({ session, now }: { session: SessionLine; now: number }) {
           ) : null}
         </p>
         <p className="mt-1 text-ink-soft text-xs">
-          Since <DateStamp at={since} now={now} withTime />
           {address ? (
             <>
-              {" from "}
-              <span className="figures break-all">{address}</span>
+              From <span className="figures wrap-anywhere">{address}</span>, since{" "}
             </>
-          ) : null}
+          ) : (
+            "Since "
+          )}
+          <DateStamp at={since} now={now} withTime />
         </p>
       </div>
       {isThisDevice ? null : (
