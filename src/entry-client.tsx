@@ -3,7 +3,7 @@ import { hydrate } from "@tanstack/react-query";
 import { StrictMode } from "react";
 import { hydrateRoot } from "react-dom/client";
 import { createBrowserRouter, UNSAFE_ErrorResponseImpl as ErrorResponse, matchRoutes } from "react-router";
-import { RouterProvider } from "react-router/dom";
+import { RouterProvider } from "react-router-dom";
 import type { PageState } from "./app/page-state.ts";
 import { Providers } from "./app/providers.tsx";
 import { routes } from "./app/routes.tsx";
