@@ -21,6 +21,21 @@ export interface ChoiceSpec extends FieldText {
   choices: readonly { value: string; label: string }[];
 }
 
+export interface TextSpec extends FieldText {
+  maxLength: number;
+}
+
+/** What is said once about a point; each of its numbers takes its name from `axes`. */
+export interface PointSpec extends FieldText {
+  /** Such as fore, out, up. */
+  axes: readonly [string, string, string];
+  /** "mm" when left out; a bare direction has none. */
+  unit?: string;
+  min: number;
+  max: number;
+  step: number;
+}
+
 interface FieldBase extends FieldText {
   name: string;
   optional: boolean;
@@ -32,6 +47,8 @@ export type InputField =
   | (FieldBase & NumberSpec & { kind: "number" })
   | (FieldBase & ChoiceSpec & { kind: "choice" })
   | (FieldBase & { kind: "switch" })
+  | (FieldBase & TextSpec & { kind: "text" })
+  | (FieldBase & { kind: "point"; axes: readonly InputField[] })
   | (FieldBase & { kind: "group"; fields: readonly InputField[] })
   | (FieldBase & { kind: "list"; item: InputField });
 
@@ -66,13 +83,38 @@ export function choiceInput<const Choices extends readonly { value: string; labe
     .meta({ kind: "choice", ...spec });
 }
 
-/** Lists the fields of an input schema, nested ones included, in the order they are written. */
+/** Schema of a few words, such as what is written on a piece. */
+export function textInput(spec: TextSpec) {
+  return z
+    .string({ error: `Give ${spec.label.toLowerCase()} in words.` })
+    .max(spec.maxLength, `${spec.label} must be ${spec.maxLength} characters or fewer.`)
+    .meta({ kind: "text", ...spec });
+}
+
+/** Schema of a point or a direction in space, `[a, b, c]`; messages name the point and the axis. */
+export function pointInput({ axes, unit = "mm", min, max, step, ...text }: PointSpec) {
+  const axis = (name: string) =>
+    numberInput({ label: `${text.label}, ${name}`, help: "", unit, min, max, step, decimals: 1 });
+  const [first, second, third] = axes;
+  return z
+    .tuple([axis(first), axis(second), axis(third)], {
+      error: `Give ${text.label.toLowerCase()} as three numbers${unit && ` in ${unit}`}: ${axes.join(", ")}.`,
+    })
+    .meta(text);
+}
+
+/**
+ * Lists the fields of an input schema, nested ones included, in the order they are written. A union of one value or a
+ * list of them is described as the list: the single value is short for one that counts for all.
+ */
 export function describeInputs(schema: z.ZodObject): InputField[] {
   return Object.entries(schema.shape).map(([name, field]) => describeField(name, field as z.ZodType));
 }
 
 function describeField(name: string, schema: z.ZodType): InputField {
-  const { inner, optional, fallback } = unwrap(schema);
+  const { inner: outer, optional, fallback } = unwrap(schema);
+  const list = outer instanceof z.ZodUnion && outer.options.find((option) => option instanceof z.ZodArray);
+  const inner = list || outer;
   const spec = { ...inner.meta(), ...schema.meta() };
   const base = { name, optional, label: name, help: "", ...spec };
   const field = fallback === undefined ? base : { ...base, default: fallback };
@@ -80,8 +122,12 @@ function describeField(name: string, schema: z.ZodType): InputField {
   if (inner instanceof z.ZodArray) {
     return { ...field, kind: "list", item: describeField("item", inner.element as z.ZodType) };
   }
+  if (inner instanceof z.ZodTuple) {
+    const axes = inner.def.items.map((item, index) => describeField(String(index), item as z.ZodType));
+    return { ...field, kind: "point", axes };
+  }
   if (inner instanceof z.ZodBoolean) return { ...field, kind: "switch" };
-  if (spec.kind === "number" || spec.kind === "choice") return field as InputField;
+  if (spec.kind === "number" || spec.kind === "choice" || spec.kind === "text") return field as InputField;
   throw new Error(`Input ${name} has no description: make it with numberInput or choiceInput`);
 }
 

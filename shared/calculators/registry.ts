@@ -2,27 +2,37 @@ import type { z } from "zod";
 import { fail, ok, type Result } from "#shared/result.ts";
 import type { TemplateNames, TemplateSheet } from "#shared/templates/sheet.ts";
 import { bolt } from "./bolt/definition.ts";
+import { cornerWeightsCalculator } from "./corner-weights/definition.ts";
 import type { CalculatorDefinition, CalculatorIssue } from "./definition.ts";
 import { filletWeld } from "./fillet-weld/definition.ts";
 import { mitre } from "./mitre/definition.ts";
 import { saddleCope } from "./saddle-cope/definition.ts";
 import { sheetBend } from "./sheet-bend/definition.ts";
+import { springRideCalculator } from "./spring-ride/definition.ts";
+import { steeringAxisCalculator } from "./steering-axis/definition.ts";
 import { strut } from "./strut/definition.ts";
 import { strutCurve } from "./strut-curve/definition.ts";
 import { tapDrill } from "./tap-drill/definition.ts";
+import { tubeBendCalculator } from "./tube-bend/definition.ts";
 import { tubePiece } from "./tube-piece/definition.ts";
 import { tubeSection } from "./tube-section/definition.ts";
+import { wishboneTravelCalculator } from "./wishbone-travel/definition.ts";
 
 /** Every calculator, in the order the bench lists them. A new one is added here and nowhere else. */
 export const calculators: readonly CalculatorDefinition[] = [
   saddleCope,
   tubePiece,
   mitre,
+  steeringAxisCalculator,
+  wishboneTravelCalculator,
+  springRideCalculator,
+  cornerWeightsCalculator,
   tubeSection,
   strut,
   strutCurve,
   filletWeld,
   bolt,
+  tubeBendCalculator,
   sheetBend,
   tapDrill,
 ];
