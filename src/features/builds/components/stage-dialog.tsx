@@ -31,7 +31,7 @@ export function StageDialog({ slug, stage, onDeleted }: StageDialogProps) {
       open={open}
       onOpenChange={setOpen}
       trigger={
-        <Button tone="quiet" className="px-2!" aria-label={`Change ${stage.title}`}>
+        <Button tone="quiet" className="px-2! max-sm:-ml-2" aria-label={`Change ${stage.title}`}>
           Change
         </Button>
       }
