@@ -25,7 +25,7 @@ export function SolidView({
 }: DrawingProps & { solid: ComponentType<DrawingProps> }) {
   const [open, setOpen] = useState(false);
   return (
-    <div className="no-print px-3 pb-3 sm:px-4">
+    <div className="no-print -mt-2">
       <Button aria-expanded={open} onClick={() => setOpen(!open)}>
         {open ? "Close the 3D view" : "Turn the joint round in 3D"}
       </Button>

@@ -84,8 +84,8 @@ function Panel({
     >
       <div className={clsx("-mx-3 -mt-3 transition-opacity sm:-mx-4 sm:-mt-4", stale && "opacity-45")}>
         {drawing ? <drawing.flat {...shown} /> : null}
-        {drawing?.solid && live ? <SolidView solid={drawing.solid} {...shown} /> : null}
       </div>
+      {drawing?.solid && live ? <SolidView solid={drawing.solid} {...shown} /> : null}
       <div className="flex flex-col gap-6">
         <form
           className="flex flex-col gap-4"
