@@ -81,9 +81,9 @@ export default {
     ),
     {
       name: "only-repositories-query",
-      comment: "Routes and services of a feature leave Drizzle to its repository.",
+      comment: "Everything else in a feature leaves Drizzle to its repositories.",
       severity: "error",
-      from: { path: "^server/features/.+/(routes|service)\\.ts$" },
+      from: { path: "^server/features/", pathNot: "repository\\.ts$" },
       to: { path: "^node_modules/drizzle-orm/" },
     },
     layer(

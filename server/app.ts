@@ -7,6 +7,7 @@ import type { Config } from "./config/environment.ts";
 import type { Database } from "./db/client.ts";
 import { siteVersion } from "./db/schema/audit.ts";
 import { serveAuth, sessionMiddleware, signOutForm } from "./features/accounts/auth-http.ts";
+import { schedulePurge } from "./features/entries/purge.ts";
 import { feedRoutes } from "./features/feeds/routes.ts";
 import { photoFiles } from "./features/photos/files.ts";
 import { scheduleCleaning } from "./features/photos/jobs.ts";
@@ -15,6 +16,7 @@ import type { ClientBuild } from "./http/client-build.ts";
 import { apiRouter, inProcessCaller } from "./http/endpoints.ts";
 import { AppError, handleErrors } from "./http/errors.ts";
 import { createPageCache, noPageCache } from "./http/page-cache.ts";
+import { pageChoices } from "./http/page-choices.ts";
 import { pages } from "./http/pages.ts";
 import { securityHeaders } from "./http/security-headers.ts";
 import { createQueue } from "./jobs/queue.ts";
@@ -60,6 +62,7 @@ export function createApp({ config, database, log, clock, client }: AppParts) {
   app.use("/api", () => {
     throw new AppError("not_found", "There is no such route.");
   });
+  app.use(pageChoices());
   app.use(photoFiles({ photos, storage, log }));
   app.use(feedRoutes({ source: entries.reading, siteUrl: config.SITE_URL, clock }));
   if (config.FAKES) app.use(mailFakeRoutes(mailFakeFolder(config.UPLOADS_DIR)));
@@ -78,6 +81,7 @@ export function createApp({ config, database, log, clock, client }: AppParts) {
     async start() {
       await mail.start();
       scheduleCleaning({ queue, clock });
+      schedulePurge({ queue, clock });
       queue.start();
     },
     async stop() {

@@ -48,10 +48,12 @@ export function registerPhotoJobs(parts: PhotoParts & { incoming: Incoming }): v
     if (photo?.rotation !== rotation) return null;
     const master = await storage.read(masterKey(id));
     const widths = widthsFor(photo.width);
-    const pixels = await inTurn(() => decodeMaster(master, { rotation, width: Math.max(...widths) }));
+    // A photo shows by its WebP pictures: those of other photos go before this one's AVIF.
+    const turn = format === "webp" ? "next" : "when_idle";
+    const pixels = await inTurn(() => decodeMaster(master, { rotation, width: Math.max(...widths) }), turn);
     const done: number[] = [];
     for (const width of widths) {
-      const bytes = await inTurn(() => makePicture(pixels, { width, format }));
+      const bytes = await inTurn(() => makePicture(pixels, { width, format }), turn);
       await storage.write(pictureKey(id, pictureFile(rotation, width, format)), bytes);
       done.push(width);
       progress(done);

@@ -1,13 +1,28 @@
-/** Runs tasks one after another in the order they come, so that decoding never takes every core. */
+type Turn = "next" | "when_idle";
+
+/**
+ * Runs tasks one after another, so that decoding never takes every core. A task that is to run `when_idle`
+ * lets all others go first, also those that come later.
+ */
 export function createOneAtATime() {
-  let last: Promise<unknown> = Promise.resolve();
-  return function run<Value>(task: () => Promise<Value>): Promise<Value> {
-    const mine = last.then(task);
-    // Not the outcome itself, which may be megabytes.
-    last = mine.then(
-      () => {},
-      () => {},
-    );
-    return mine;
+  const waiting: Record<Turn, (() => Promise<void>)[]> = { next: [], when_idle: [] };
+  let busy = false;
+
+  async function work(): Promise<void> {
+    if (busy) return;
+    busy = true;
+    for (let task = take(); task; task = take()) await task();
+    busy = false;
+  }
+
+  function take(): (() => Promise<void>) | undefined {
+    return waiting.next.shift() ?? waiting.when_idle.shift();
+  }
+
+  return function run<Value>(task: () => Promise<Value>, turn: Turn = "next"): Promise<Value> {
+    return new Promise((resolve, reject) => {
+      waiting[turn].push(() => task().then(resolve, reject));
+      void work();
+    });
   };
 }
