@@ -11,6 +11,7 @@ import { schedulePurge } from "./features/entries/purge.ts";
 import { feedRoutes } from "./features/feeds/routes.ts";
 import { photoFiles } from "./features/photos/files.ts";
 import { scheduleCleaning } from "./features/photos/jobs.ts";
+import { templateFiles } from "./features/workings/template-files.ts";
 import { createFeatures } from "./features.ts";
 import type { ClientBuild } from "./http/client-build.ts";
 import { apiRouter, inProcessCaller } from "./http/endpoints.ts";
@@ -39,7 +40,7 @@ export type App = ReturnType<typeof createApp>;
 export function createApp({ config, database, log, clock, client }: AppParts) {
   const queue = createQueue({ database, log, clock });
   const storage = createLocalStorage(config.UPLOADS_DIR);
-  const { mail, auth, photos, entries, routes } = createFeatures({
+  const { mail, auth, photos, entries, workings, routes } = createFeatures({
     config,
     database,
     log,
@@ -59,6 +60,7 @@ export function createApp({ config, database, log, clock, client }: AppParts) {
   app.post("/sign-out", signOutForm(auth));
   app.use(sessionMiddleware(auth));
   app.use(apiRouter(routes));
+  app.use(templateFiles({ workings, clock }));
   app.use("/api", () => {
     throw new AppError("not_found", "There is no such route.");
   });

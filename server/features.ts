@@ -18,6 +18,8 @@ import { registerPhotoJobs } from "./features/photos/jobs.ts";
 import { photoRoutes } from "./features/photos/routes.ts";
 import { createPhotoService } from "./features/photos/service.ts";
 import { createIncoming } from "./features/photos/upload.ts";
+import { workingRoutes } from "./features/workings/routes.ts";
+import { createWorkingService } from "./features/workings/service.ts";
 import { type Route, route } from "./http/endpoints.ts";
 import type { Queue } from "./jobs/queue.ts";
 import { createMail } from "./mail/mail.ts";
@@ -48,6 +50,10 @@ export function createFeatures({ config, database, log, clock, queue, storage }:
   const entries = createEntryService({ database, clock, queue, log, builds: reader, photoViews });
   const stages = createStageService({ database, clock, reader });
   const builds = createBuildService({ database, clock, reader, publicEntries: entries.reading.ofBuild });
+  const workings = createWorkingService({
+    database,
+    canReadEntry: (_viewer, entry) => entry.state === "public",
+  });
   const demoLoaded = config.DEMO && demoState(database) === "loaded";
 
   const routes: Route[] = [
@@ -56,6 +62,7 @@ export function createFeatures({ config, database, log, clock, queue, storage }:
     ...buildRoutes(builds, stages),
     ...entryRoutes(entries),
     ...photoRoutes(photos, incoming),
+    ...workingRoutes(workings),
   ];
-  return { mail, auth, photos, entries, routes };
+  return { mail, auth, photos, entries, workings, routes };
 }

@@ -28,7 +28,12 @@ function WorkingBlock({ workingId }: WorkingAttributes) {
         {/* The number stands in the margin. */}
         <Island
           source={workingPanel}
-          props={{ working: { ...working, number: null }, mode: "read", units }}
+          props={{
+            working: { ...working, number: null },
+            mode: "read",
+            units,
+            templateBase: `/api/workings/${working.id}/template`,
+          }}
         />
       </div>
     </MarginRow>
