@@ -3,6 +3,7 @@ import compression from "compression";
 import { eq } from "drizzle-orm";
 import express, { type Express } from "express";
 import type { Logger } from "pino";
+import sirv from "sirv";
 import type { Config } from "./config/environment.ts";
 import type { Database } from "./db/client.ts";
 import { siteVersion } from "./db/schema/audit.ts";
@@ -54,8 +55,8 @@ export function createApp({ config, database, log, clock, client }: AppParts) {
   app.disable("x-powered-by");
   app.set("trust proxy", config.TRUSTED_PROXIES);
   app.use(securityHeaders({ https: config.SITE_URL.startsWith("https:"), development }));
-  app.use(compression());
   serveStaticFiles(app);
+  app.use(compression());
   app.all("/api/auth/{*any}", serveAuth(auth));
   app.post("/sign-out", signOutForm(auth));
   app.use(sessionMiddleware(auth));
@@ -93,11 +94,14 @@ export function createApp({ config, database, log, clock, client }: AppParts) {
   };
 }
 
+const yearSeconds = 365 * 24 * 3600;
+
 /** Built files carry a hash of their content in their name; those of public/ do not. */
 function serveStaticFiles(app: Express): void {
   const assets = "dist/client/assets";
-  if (existsSync(assets))
-    app.use("/assets", express.static(assets, { immutable: true, maxAge: "1y", index: false }));
+  if (existsSync(assets)) {
+    app.use("/assets", sirv(assets, { immutable: true, maxAge: yearSeconds, brotli: true, gzip: true }));
+  }
   app.use(express.static("public", { maxAge: "1h", index: false }));
 }
 

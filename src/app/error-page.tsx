@@ -1,15 +1,25 @@
-import { isRouteErrorResponse, useRouteError } from "react-router";
+import { isRouteErrorResponse, useLocation, useRouteError } from "react-router";
+import { buttonClass } from "#src/components/button-class.ts";
+import { EmptyState } from "#src/components/empty-state.tsx";
+import { ErrorState } from "#src/components/error-state.tsx";
+import { LinkButton } from "#src/components/link-button.tsx";
 import { paths } from "#src/lib/paths.ts";
 
 interface Told {
   title: string;
   message: string;
+  /** What the person can do about it; the front page is offered in any case. */
+  way?: "sign_in" | "again";
 }
 
+const broke: Told = {
+  title: "Something broke",
+  message: "This page could not be shown. Try again in a moment.",
+  way: "again",
+};
+
 function told(error: unknown): Told {
-  if (!isRouteErrorResponse(error)) {
-    return { title: "Something broke", message: "This page could not be shown. Try again in a moment." };
-  }
+  if (!isRouteErrorResponse(error)) return broke;
   const message = (error.data as { message?: string } | null)?.message;
   if (error.status === 404) {
     return {
@@ -17,29 +27,46 @@ function told(error: unknown): Told {
       message: message ?? "There is no page at this address, or it was withdrawn.",
     };
   }
-  if (error.status === 401) return { title: "Sign in first", message: "This page is for signed-in people." };
-  if (error.status === 403)
+  if (error.status === 401) {
+    return { title: "Sign in first", message: "This page is for signed-in people.", way: "sign_in" };
+  }
+  if (error.status === 403) {
     return { title: "Not yours to open", message: message ?? "You may not see this page." };
-  return {
-    title: "Something broke",
-    message: message ?? "This page could not be shown. Try again in a moment.",
-  };
+  }
+  return { ...broke, message: message ?? broke.message };
 }
 
 /** Shown in place of a page that could not be loaded or drawn. */
 export function ErrorPage() {
-  const { title, message } = told(useRouteError());
+  const { title, message, way } = told(useRouteError());
+  const { pathname, search } = useLocation();
+  const here = pathname + search;
+  const State = way === "again" ? ErrorState : EmptyState;
   return (
-    <div className="mx-auto max-w-xl px-4 py-24">
+    <div className="page-width pt-12">
       <title>{`${title} · Soapstone`}</title>
       <meta name="robots" content="noindex" />
-      <h1 className="font-sans text-3xl font-semibold">{title}</h1>
-      <p className="mt-4">{message}</p>
-      <p className="mt-8">
-        <a className="text-temper underline" href={paths.home()}>
-          Go to the front page
-        </a>
-      </p>
+      <h1 className="mb-6">{title}</h1>
+      <State
+        title={message}
+        action={
+          <>
+            {way === "sign_in" ? (
+              <LinkButton tone="primary" to={paths.signIn(here)}>
+                Sign in
+              </LinkButton>
+            ) : null}
+            {way === "again" ? (
+              <a href={here} className={buttonClass("primary")}>
+                Try again
+              </a>
+            ) : null}
+            <LinkButton to={paths.home()}>Go to the front page</LinkButton>
+          </>
+        }
+      >
+        {way === undefined ? <p>The builds that are public are all in the list of builds.</p> : null}
+      </State>
     </div>
   );
 }

@@ -13,8 +13,11 @@ interface EntryRowProps {
 /** An entry in its stage: its number in the margin, what it is about, its first photo. */
 export function EntryRow({ build, entry, now }: EntryRowProps) {
   return (
-    <article className="group relative grid grid-cols-[2.25rem_minmax(0,1fr)] gap-x-3 py-5 sm:grid-cols-[2.25rem_minmax(0,1fr)_9rem] sm:gap-x-5">
-      <p className="figures pt-0.5 text-right text-lg leading-tight font-medium text-grey" aria-hidden="true">
+    <article className="group relative grid grid-cols-[1.75rem_minmax(0,1fr)] gap-x-2 py-5 sm:grid-cols-[2.25rem_minmax(0,1fr)_9rem] sm:gap-x-5">
+      <p
+        className="figures pt-0.5 text-lg leading-tight sm:text-right font-medium text-grey"
+        aria-hidden="true"
+      >
         {entry.number}
       </p>
       <div className="min-w-0">
