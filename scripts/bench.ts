@@ -1,4 +1,5 @@
 import { benchBundle } from "./bench/bundle.ts";
+import { benchCalculators } from "./bench/calculators.ts";
 import { benchCope } from "./bench/cope.ts";
 import { benchPages } from "./bench/pages.ts";
 import { benchPhotos } from "./bench/photos.ts";
@@ -12,6 +13,7 @@ try {
   const rows: BenchRow[] = [
     ...(await benchPages(site)),
     await benchCope(),
+    ...benchCalculators(),
     ...(await benchPhotos(site)),
     ...(await benchBundle(site)),
   ];

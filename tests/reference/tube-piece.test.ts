@@ -99,7 +99,16 @@ function cut(solid: Manifold, end: End, joint: number, heel: number, along: 1 | 
   );
 }
 
-function solidOf({
+const known = new Map<object, Manifold>();
+
+/** The kernel's cuts are the slow part: once for shape and mass. */
+function solidOf(inputs: (typeof settings)[number]): Manifold {
+  const solid = known.get(inputs) ?? bothCuts(inputs);
+  known.set(inputs, solid);
+  return solid;
+}
+
+function bothCuts({
   between,
   branchOd,
   branchWall,

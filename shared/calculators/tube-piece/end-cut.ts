@@ -14,7 +14,7 @@ export interface EndCut {
 }
 
 /** Steps of the walk round the tube; the search between them is fine. */
-export const WALK = 360;
+export const WALK = 180;
 
 /**
  * The cut of one end.

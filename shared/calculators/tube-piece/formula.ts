@@ -116,8 +116,8 @@ function metal(
 ) {
   const ring = (radius: number) => {
     let sum = 0;
-    for (let around = 0; around < 360; around += 2) sum += lengthAt(radius, around);
-    return (sum / 180) * 2 * Math.PI * radius;
+    for (let around = 0; around < 360; around += 4) sum += lengthAt(radius, around);
+    return (sum / 90) * 2 * Math.PI * radius;
   };
   const outside = branchOd / 2;
   const bore = outside - branchWall;
