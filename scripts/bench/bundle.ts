@@ -19,9 +19,9 @@ export async function benchBundle(site: Site): Promise<BenchRow[]> {
   return [
     {
       name: "reader's first load, JavaScript compressed",
-      value: `${kb(gzip)} kB gzip, ${kb(brotli)} kB brotli, ${new Set(scripts).size} files`,
-      budget: `under ${budgetKb} kB`,
-      ok: gzip / 1000 < budgetKb,
+      value: `${kb(brotli)} kB brotli (${kb(gzip)} kB gzip), ${new Set(scripts).size} files`,
+      budget: `under ${budgetKb} kB in brotli, as every browser takes it over HTTPS`,
+      ok: brotli / 1000 < budgetKb,
     },
   ];
 }

@@ -1,7 +1,7 @@
 import { useEffect, useRef, useState } from "react";
 import { type PhotoView, photoLimits } from "#shared/contracts/photos.ts";
+import { messageOf } from "#src/lib/form-errors.ts";
 import { uploadPhoto } from "#src/lib/upload.ts";
-import { messageOf } from "./form-errors.ts";
 
 export type CoverUpload =
   | { state: "idle" }

@@ -1,8 +1,8 @@
 import { useForm } from "react-hook-form";
 import { Button } from "#src/components/button.tsx";
 import { TextField } from "#src/components/text-field.tsx";
+import { showErrors } from "#src/lib/form-errors.ts";
 import { useHydrated } from "#src/lib/use-hydrated.ts";
-import { showErrors } from "../form-errors.ts";
 import { useAddStage } from "../mutations.ts";
 import { stageTitleRules } from "../stage-title-rules.ts";
 

@@ -5,10 +5,10 @@ import { slug } from "#shared/contracts/common.ts";
 import { Button } from "#src/components/button.tsx";
 import { Notice } from "#src/components/notice.tsx";
 import { TextField } from "#src/components/text-field.tsx";
+import { showErrors } from "#src/lib/form-errors.ts";
 import { usePageSettings } from "#src/lib/page-settings.ts";
 import { paths } from "#src/lib/paths.ts";
 import { useHydrated } from "#src/lib/use-hydrated.ts";
-import { showErrors } from "../form-errors.ts";
 import { useUpdateBuild } from "../mutations.ts";
 
 const addressBody = z.object({

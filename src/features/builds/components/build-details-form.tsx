@@ -4,8 +4,8 @@ import { type CreateBuildBody, createBuildBody } from "#shared/contracts/builds.
 import type { WorkshopBuild } from "#shared/contracts/entries.ts";
 import { Button } from "#src/components/button.tsx";
 import { Notice } from "#src/components/notice.tsx";
+import { showErrors } from "#src/lib/form-errors.ts";
 import { useHydrated } from "#src/lib/use-hydrated.ts";
-import { showErrors } from "../form-errors.ts";
 import { useUpdateBuild } from "../mutations.ts";
 import { offerUndo } from "../offer-undo.ts";
 import { BuildFields, type BuildValues, buildFieldNames } from "./build-fields.tsx";

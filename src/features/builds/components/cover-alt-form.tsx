@@ -3,8 +3,8 @@ import type { WorkshopBuild } from "#shared/contracts/entries.ts";
 import { Button } from "#src/components/button.tsx";
 import { Notice } from "#src/components/notice.tsx";
 import { TextArea } from "#src/components/text-area.tsx";
+import { showErrors } from "#src/lib/form-errors.ts";
 import { useHydrated } from "#src/lib/use-hydrated.ts";
-import { showErrors } from "../form-errors.ts";
 import { useUpdateBuild } from "../mutations.ts";
 
 const mostAlt = 300;

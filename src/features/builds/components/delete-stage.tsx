@@ -2,7 +2,7 @@ import { useState } from "react";
 import type { StageView } from "#shared/contracts/builds.ts";
 import { Button } from "#src/components/button.tsx";
 import { Notice } from "#src/components/notice.tsx";
-import { messageOf } from "../form-errors.ts";
+import { messageOf } from "#src/lib/form-errors.ts";
 import { useDeleteStage } from "../mutations.ts";
 import { counted } from "../state-words.ts";
 

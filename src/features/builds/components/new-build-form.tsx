@@ -4,9 +4,9 @@ import { type CreateBuildBody, createBuildBody } from "#shared/contracts/builds.
 import { Button } from "#src/components/button.tsx";
 import { LinkButton } from "#src/components/link-button.tsx";
 import { Notice } from "#src/components/notice.tsx";
+import { showErrors } from "#src/lib/form-errors.ts";
 import { paths } from "#src/lib/paths.ts";
 import { useHydrated } from "#src/lib/use-hydrated.ts";
-import { showErrors } from "../form-errors.ts";
 import { useCreateBuild } from "../queries.ts";
 import { BuildFields, type BuildValues, buildFieldNames } from "./build-fields.tsx";
 

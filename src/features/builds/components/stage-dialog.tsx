@@ -7,7 +7,7 @@ import { Notice } from "#src/components/notice.tsx";
 import { SelectField } from "#src/components/select-field.tsx";
 import { TextField } from "#src/components/text-field.tsx";
 import { toasts } from "#src/components/toast-store.ts";
-import { messageOf, showErrors } from "../form-errors.ts";
+import { messageOf, showErrors } from "#src/lib/form-errors.ts";
 import { useChangeStage } from "../mutations.ts";
 import { offerUndo } from "../offer-undo.ts";
 import { stageTitleRules } from "../stage-title-rules.ts";

@@ -4,7 +4,7 @@ import { EmptyState } from "#src/components/empty-state.tsx";
 import { LiveRegion } from "#src/components/live-region.tsx";
 import { SortableList } from "#src/components/sortable-list.tsx";
 import { toasts } from "#src/components/toast-store.ts";
-import { messageOf } from "../form-errors.ts";
+import { messageOf } from "#src/lib/form-errors.ts";
 import { useOrderStages } from "../mutations.ts";
 import { counted, stageStateWords } from "../state-words.ts";
 import { AddStageForm } from "./add-stage-form.tsx";
