@@ -22,7 +22,7 @@ export function PhotoNodeView(props: ReactNodeViewProps) {
   const inGroup = editor.state.doc.resolve(pos).parent.type.name === "photoGroup";
   const canJoin = joinPhotoAbove(editor.state, pos) !== null;
   return (
-    <NodeViewWrapper className="editor-block" data-selected={selected || undefined}>
+    <NodeViewWrapper className="editor-block not-prose" data-selected={selected || undefined}>
       <View
         attributes={node.attrs as PhotoAttributes}
         update={updateAttributes}
@@ -41,7 +41,7 @@ export function PhotoGroupNodeView(props: ReactNodeViewProps) {
   const { photoGroup: View } = useNodeViews();
   const command = useNodeCommand(props);
   return (
-    <NodeViewWrapper className="editor-block" data-selected={props.selected || undefined}>
+    <NodeViewWrapper className="editor-block not-prose" data-selected={props.selected || undefined}>
       <View
         count={props.node.childCount}
         remove={props.deleteNode}
@@ -58,7 +58,7 @@ export function WorkingNodeView(props: ReactNodeViewProps) {
   const { working: View } = useNodeViews();
   const command = useNodeCommand(props);
   return (
-    <NodeViewWrapper className="editor-block" data-selected={props.selected || undefined}>
+    <NodeViewWrapper className="editor-block not-prose" data-selected={props.selected || undefined}>
       <View
         attributes={props.node.attrs as WorkingAttributes}
         update={props.updateAttributes}

@@ -4,6 +4,7 @@ import { isAllowedHref } from "#shared/document/href.ts";
 import { Button } from "#src/components/button.tsx";
 import { Dialog } from "#src/components/dialog.tsx";
 import { TextField } from "#src/components/text-field.tsx";
+import { focusHere } from "#src/lib/focus-here.ts";
 
 interface LinkDialogProps {
   editor: Editor;
@@ -53,6 +54,7 @@ export function LinkDialog({ editor, onClose }: LinkDialogProps) {
       <form id={formId} onSubmit={submit} noValidate className="flex flex-col gap-4">
         <TextField
           label="Address"
+          ref={focusHere}
           value={href}
           error={error}
           inputMode="url"

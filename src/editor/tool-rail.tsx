@@ -1,12 +1,11 @@
-import type { Editor } from "@tiptap/core";
-import { useEditorState } from "@tiptap/react";
 import Ellipsis from "lucide-react/icons/ellipsis";
 import Keyboard from "lucide-react/icons/keyboard";
-import { Menu, type MenuEntry } from "#src/components/menu.tsx";
+import { useState } from "react";
+import { MoreSheet } from "./more-sheet.tsx";
 import { ToolButton } from "./tool-button.tsx";
+import { type ToolStates, useToolStates } from "./tool-states.ts";
 import {
   allTools,
-  cameraTool,
   historyTools,
   insertTools,
   type Tool,
@@ -30,26 +29,6 @@ export function ToolRail({ context, openHelp }: ToolRailProps) {
       <ThumbBar context={context} states={states} openHelp={openHelp} />
     </>
   );
-}
-
-interface ToolStates {
-  tools: Record<string, { active: boolean; enabled: boolean }>;
-  inTable: boolean;
-}
-
-function useToolStates(editor: Editor): ToolStates {
-  return useEditorState({
-    editor,
-    selector: ({ editor: now }) => ({
-      tools: Object.fromEntries(
-        allTools.map(({ id, active, enabled }) => [
-          id,
-          { active: active?.(now) ?? false, enabled: enabled?.(now) ?? true },
-        ]),
-      ),
-      inTable: now.isActive("table"),
-    }),
-  });
 }
 
 function WideRail({ context, states, openHelp }: ToolRailProps & { states: ToolStates }) {
@@ -120,6 +99,7 @@ const onTheBar = ["photo", "working", "heading2", "bulletList", "bold", "caution
 
 function ThumbBar({ context, states, openHelp }: ToolRailProps & { states: ToolStates }) {
   const { onKeyDown, stop } = useRovingFocus("photo");
+  const [more, setMore] = useState(false);
   const tools = onTheBar.flatMap((id) => allTools.filter((tool) => tool.id === id));
   return (
     <div role="toolbar" aria-label="Tools" onKeyDown={onKeyDown} className="editor-thumb-bar">
@@ -132,43 +112,25 @@ function ThumbBar({ context, states, openHelp }: ToolRailProps & { states: ToolS
           onClick={() => tool.run(context)}
         />
       ))}
-      <Menu
-        label="More tools"
-        entries={moreEntries(context, states, openHelp)}
-        trigger={
-          <button type="button" {...stop("more")} aria-label="More tools" className="editor-tool">
-            <Ellipsis aria-hidden="true" className="size-5" />
-          </button>
-        }
-      />
+      <button
+        type="button"
+        {...stop("more")}
+        aria-label="More tools"
+        aria-haspopup="dialog"
+        onClick={() => setMore(true)}
+        className="editor-tool"
+      >
+        <Ellipsis aria-hidden="true" className="size-5" />
+      </button>
+      {more ? (
+        <MoreSheet
+          context={context}
+          states={states}
+          onTheBar={onTheBar}
+          openHelp={openHelp}
+          onClose={() => setMore(false)}
+        />
+      ) : null}
     </div>
   );
-}
-
-function moreEntries(context: ToolContext, states: ToolStates, openHelp: () => void): MenuEntry[] {
-  const entry = (tool: Tool): MenuEntry => ({
-    kind: "action",
-    label: states.tools[tool.id]?.active ? `${tool.name} (on)` : tool.name,
-    disabled: states.tools[tool.id]?.enabled === false,
-    onSelect: () => afterMenu(() => tool.run(context)),
-  });
-  const rest = [...insertTools, ...textTools].filter((tool) => !onTheBar.includes(tool.id));
-  const table: MenuEntry[] = tableActions.map(({ label, run }) => ({
-    kind: "action",
-    label,
-    onSelect: () => afterMenu(() => run(context.editor.chain().focus()).run()),
-  }));
-  return [
-    ...(states.inTable ? [...table, { kind: "separator" as const }] : []),
-    entry(cameraTool),
-    ...rest.map(entry),
-    { kind: "separator" },
-    ...historyTools.map(entry),
-    { kind: "action", label: "Keyboard shortcuts", onSelect: openHelp },
-  ];
-}
-
-/** The menu hands the focus back to its button as it closes; the tool acts after that. */
-function afterMenu(run: () => void): void {
-  setTimeout(run, 0);
 }

@@ -19,19 +19,25 @@ export class DraftChannel {
   ) {
     this.#channel = new BroadcastChannel(`soapstone-draft-${entryId}`);
     this.#channel.onmessage = ({ data }: MessageEvent<Message>) => this.#hear(data);
-    this.#say({ kind: "hello" });
-  }
-
-  get tabs(): ReadonlySet<string> {
-    return this.#tabs;
+    this.arrive();
   }
 
   announceSaved(version: number): void {
     this.#say({ kind: "saved", version });
   }
 
-  close(): void {
+  /** Says that this tab has the draft open; the others answer. */
+  arrive(): void {
+    this.#say({ kind: "hello" });
+  }
+
+  /** Says that this tab is going; a page that is closed gets no other chance to. */
+  leave(): void {
     this.#say({ kind: "bye" });
+  }
+
+  close(): void {
+    this.leave();
     this.#channel.close();
   }
 

@@ -66,17 +66,41 @@ function mergeBlocks(base: RichDocument, mine: RichDocument, theirs: RichDocumen
   for (const region of regions) {
     if (region.ok) blocks.push(...blocksOf(region.ok));
     if (!region.conflict) continue;
-    const { a, b } = region.conflict;
-    if (a.length === 0 || b.length === 0) {
-      // One side deleted what the other rewrote: the words win over their absence.
-      blocks.push(...blocksOf(a), ...blocksOf(b));
-      continue;
+    for (const { mine: here, theirs: there } of versionsOf(region.conflict)) {
+      const two = here.length > 0 && there.length > 0 && here.join() !== there.join();
+      if (two) conflicts += 1;
+      blocks.push(...(two ? marked(here, there) : blocksOf(here.length > 0 ? here : there)));
     }
-    conflicts += 1;
-    blocks.push(note(mergeMarks.mine), ...blocksOf(a), note(mergeMarks.theirs), ...blocksOf(b));
-    blocks.push(note(mergeMarks.end));
   }
   return { blocks, conflicts };
+}
+
+interface Versions {
+  mine: string[];
+  theirs: string[];
+}
+
+/**
+ * A conflict as its parts. Where no block came or went they pair off, so that neighbours changed on different sides
+ * are no conflict; where one side deleted what the other rewrote, the words win over their absence.
+ */
+function versionsOf({ a, o, b }: { a: string[]; o: string[]; b: string[] }): Versions[] {
+  if (a.length !== o.length || b.length !== o.length) return [{ mine: a, theirs: b }];
+  return o.map((before, index) => {
+    const [mine = before, theirs = before] = [a[index], b[index]];
+    if (theirs === before) return { mine: [mine], theirs: [] };
+    return { mine: mine === before ? [] : [mine], theirs: [theirs] };
+  });
+}
+
+function marked(mine: string[], theirs: string[]): DocumentNode[] {
+  return [
+    note(mergeMarks.mine),
+    ...blocksOf(mine),
+    note(mergeMarks.theirs),
+    ...blocksOf(theirs),
+    note(mergeMarks.end),
+  ];
 }
 
 /** Blocks are told apart by all that is in them. */

@@ -77,7 +77,15 @@ export function useDraft(draft: EntryDraft, editor: RefObject<EditorHandle | nul
       },
     });
     channel.current = opened;
-    return () => opened.close();
+    const leave = () => opened.leave();
+    const comeBack = ({ persisted }: PageTransitionEvent) => persisted && opened.arrive();
+    window.addEventListener("pagehide", leave);
+    window.addEventListener("pageshow", comeBack);
+    return () => {
+      window.removeEventListener("pagehide", leave);
+      window.removeEventListener("pageshow", comeBack);
+      opened.close();
+    };
   }, [autosave, catchUp, draft.id, tab]);
 
   useEffect(() => {
@@ -103,7 +111,7 @@ export function useDraft(draft: EntryDraft, editor: RefObject<EditorHandle | nul
     };
   }, [autosave, catchUp]);
 
-  return { autosave, state, content, change, goOnFrom, otherTabs, deviceFull, tab, channel };
+  return { autosave, state, content, change, goOnFrom, otherTabs, deviceFull, tab };
 }
 
 export type OpenDraft = ReturnType<typeof useDraft>;

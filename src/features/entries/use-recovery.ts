@@ -12,10 +12,11 @@ const answerTime = 500;
 /** Words of an earlier visit that never reached the server, and what may be done with them. */
 export function useRecovery(draft: EntryDraft, open: OpenDraft) {
   const [found, setFound] = useState<KeptDraft | null>(null);
-  const { channel, tab, autosave, goOnFrom } = open;
+  const { otherTabs, tab, autosave, goOnFrom } = open;
+  // Looked at again when another tab goes: what it could not save is then this tab's to offer.
   useEffect(() => {
     const timer = setTimeout(() => {
-      const openTabs = new Set([tab, ...(channel.current?.tabs ?? [])]);
+      const openTabs = new Set([tab, ...otherTabs]);
       const [newest] = keptDrafts(localStorage, draft.id, openTabs).filter((kept) => {
         const known = sameContent(kept.content, autosave.base.content);
         if (known) forget(draft.id, kept);
@@ -24,7 +25,7 @@ export function useRecovery(draft: EntryDraft, open: OpenDraft) {
       setFound(newest ?? null);
     }, answerTime);
     return () => clearTimeout(timer);
-  }, [autosave, channel, draft.id, tab]);
+  }, [autosave, draft.id, otherTabs, tab]);
 
   const drop = () => {
     if (found) forget(draft.id, found);

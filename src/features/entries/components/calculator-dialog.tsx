@@ -1,5 +1,6 @@
 import { calculators } from "#shared/calculators/registry.ts";
 import { Dialog } from "#src/components/dialog.tsx";
+import { focusHere } from "#src/lib/focus-here.ts";
 
 interface CalculatorDialogProps {
   onClose(): void;
@@ -16,10 +17,11 @@ export function CalculatorDialog({ onClose, onChoose }: CalculatorDialogProps) {
       description="Choose the calculator. It starts with the numbers of an example: put in your own."
     >
       <ul className="flex flex-col gap-2">
-        {calculators.map(({ id, name, purpose, group, example }) => (
+        {calculators.map(({ id, name, purpose, group, example }, index) => (
           <li key={id}>
             <button
               type="button"
+              ref={index === 0 ? focusHere : undefined}
               onClick={() => onChoose({ calculator: id, title: "", inputs: { ...example } })}
               className="w-full cursor-pointer rounded border border-edge bg-paper px-4 py-3 text-left hover:bg-temper-wash"
             >

@@ -26,7 +26,7 @@ export function EntryFields({ draft, content, errors, change }: EntryFieldsProps
         value={content.title}
         error={tooLong("title", "The title") ?? errors.title}
         placeholder="What this entry is about"
-        className="text-xl leading-tight font-semibold"
+        className="min-h-14! text-xl! leading-tight! font-semibold"
         // A title is one line: Enter would only be lost on saving.
         onKeyDown={(event) => event.key === "Enter" && event.preventDefault()}
         onChange={(event) => change({ title: event.target.value.replaceAll("\n", " ") })}
@@ -35,6 +35,7 @@ export function EntryFields({ draft, content, errors, change }: EntryFieldsProps
         label="Summary"
         optional
         rows={2}
+        className="min-h-20!"
         help="One or two sentences, shown in lists and feeds."
         value={content.summary}
         error={tooLong("summary", "The summary") ?? errors.summary}

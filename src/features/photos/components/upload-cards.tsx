@@ -15,7 +15,7 @@ export function UploadCards({ queue, place }: UploadCardsProps) {
   const here = uploads.filter((upload) => upload.place === place);
   if (here.length === 0) return null;
   return (
-    <div className="editor-block flex flex-col gap-4 border border-dashed border-edge p-4">
+    <div className="editor-block not-prose flex flex-col gap-4 border border-dashed border-edge p-4">
       {here.map((upload) => (
         <UploadCard key={upload.id} upload={upload} queue={queue} />
       ))}

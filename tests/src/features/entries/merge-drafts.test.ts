@@ -51,6 +51,25 @@ describe("mergeDrafts", () => {
     expect(hasMergeMarks(content.document)).toBe(true);
   });
 
+  it("takes neighbouring parts from the side that changed each, and marks only what both changed", () => {
+    const base = draft([line("a"), line("b"), line("c")]);
+    const { content, conflicts } = merge(
+      base,
+      draft([line("a1"), line("b"), line("c1")]),
+      draft([line("a2"), line("b2"), line("c")]),
+    );
+    expect(texts(content)).toEqual([
+      mergeMarks.mine,
+      "a1",
+      mergeMarks.theirs,
+      "a2",
+      mergeMarks.end,
+      "b2",
+      "c1",
+    ]);
+    expect(conflicts).toBe(1);
+  });
+
   it("keeps a part that one side rewrote and the other deleted", () => {
     const base = draft([line("a"), line("b")]);
     const { content } = merge(base, draft([line("b")]), draft([line("a, better"), line("b")]));
@@ -117,10 +136,10 @@ describe("mergeDrafts", () => {
   });
 });
 
-const blocks = fc.array(
-  fc.integer({ min: 0, max: 5 }).map((n) => line(`paragraph ${n}`)),
-  { minLength: 1, maxLength: 8 },
-);
+/** Blocks that differ: of two alike, one could rightly go while the other stays. */
+const blocks = fc
+  .uniqueArray(fc.integer({ min: 0, max: 30 }), { minLength: 1, maxLength: 8 })
+  .map((numbers) => numbers.map((n) => line(`paragraph ${n}`)));
 const edits = fc.array(
   fc.record({
     at: fc.nat(9),
