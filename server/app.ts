@@ -35,8 +35,6 @@ interface AppParts {
   client?: ClientBuild;
 }
 
-export type App = ReturnType<typeof createApp>;
-
 /** Wires everything without listening. */
 export function createApp({ config, database, log, clock, client }: AppParts) {
   const queue = createQueue({ database, log, clock });

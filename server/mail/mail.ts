@@ -16,8 +16,6 @@ interface MailParts {
   log: Logger;
 }
 
-export type Mail = ReturnType<typeof createMail>;
-
 /** Where the mail fake keeps its letters. */
 export function mailFakeFolder(uploads: string): string {
   return join(uploads, "dev-mail");

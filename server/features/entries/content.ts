@@ -13,7 +13,7 @@ export interface WorkedWorking {
 }
 
 /** What an entry says: the part of it that revisions keep. */
-export interface EntryContent {
+interface EntryContent {
   title: string;
   summary: string;
   document: DocumentJson;

@@ -1,6 +1,6 @@
 import type { Point } from "#shared/templates/sheet.ts";
 import { footHeight, pageMargin, type Tile, type Tiling } from "#shared/templates/tiling.ts";
-import type { PrintedSheet } from "./template-pdf.ts";
+import type { PrintedSheet } from "./printed-sheet.ts";
 import { write, writeParagraph } from "./template-pdf-text.ts";
 
 const soft = "#555555";

@@ -1,7 +1,8 @@
 import PDFDocument from "pdfkit";
 import { checkBars } from "#shared/templates/check-bars.ts";
-import type { Layer, SheetLabel, SheetLine, TemplateNames, TemplateSheet } from "#shared/templates/sheet.ts";
-import type { Tile, Tiling } from "#shared/templates/tiling.ts";
+import type { Layer, SheetLabel, SheetLine } from "#shared/templates/sheet.ts";
+import type { Tile } from "#shared/templates/tiling.ts";
+import type { PrintedSheet } from "./printed-sheet.ts";
 import { templateFonts } from "./template-fonts.ts";
 import { drawFoot, drawHead, drawNeighbours } from "./template-pdf-frame.ts";
 import { write } from "./template-pdf-text.ts";
@@ -17,15 +18,6 @@ const pens: Record<Layer, { colour: string; width: number; dash?: [number, numbe
   edge: { colour: "#333333", width: 0.15 },
   check: { colour: "#000000", width: 0.2 },
 };
-
-export interface PrintedSheet {
-  sheet: TemplateSheet;
-  tiling: Tiling;
-  names: TemplateNames;
-  /** The calculator's name, over the names of the build. */
-  heading: string;
-  cautions: readonly string[];
-}
 
 /**
  * Draws a template sheet on its pages at exactly 1:1, each page with names, facts, check bars and cautions.

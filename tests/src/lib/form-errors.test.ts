@@ -1,6 +1,6 @@
 import { describe, expect, it, vi } from "vitest";
-import { messageOf, showErrors } from "#src/features/builds/form-errors.ts";
 import { ApiError } from "#src/lib/api.ts";
+import { messageOf, showErrors } from "#src/lib/form-errors.ts";
 
 describe("showErrors", () => {
   it("puts a server's message beside its field and the focus on the first", () => {
