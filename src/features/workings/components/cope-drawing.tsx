@@ -11,11 +11,11 @@ export function CopeDrawing({ inputs, results, units }: DrawingProps<SaddleCopeI
   const show = (length: number) => lengthFigure(length, units, 1);
   const parts = { inputs, results, show };
   return (
-    <div className="grid @lg:grid-cols-[minmax(0,4fr)_minmax(0,3fr)]">
+    <div className="grid grid-cols-[minmax(0,1fr)] @lg:grid-cols-[minmax(0,4fr)_minmax(0,3fr)]">
       <div className="plate-drawing mb-0! @lg:mr-0!">
         <CopeSideView {...parts} />
       </div>
-      <div className="plate-drawing mb-0!">
+      <div className="plate-drawing mb-0! *:max-h-60 @lg:*:max-h-none">
         <CopeEndView {...parts} />
       </div>
       <figure className="plate-drawing @lg:col-span-2">

@@ -20,8 +20,6 @@ interface SideViewProps {
 export function CopeSideView({ inputs, results, show }: SideViewProps) {
   const plan = planSideView(joint(inputs), results);
   const { at, tube, length, reach } = plan;
-  const heelEdge = (s: number): Spot => at(s, tube.r + plan.gap);
-  const toeEdge = (s: number): Spot => at(s, -tube.r - plan.gap);
   const tip = results.tipFromAxis;
   const centre = at(0, 0);
   return (
@@ -60,20 +58,8 @@ export function CopeSideView({ inputs, results, show }: SideViewProps) {
         className="line-dimension"
         d={linePath([at(plan.toe, -tube.r), at(plan.toe, -tube.r - plan.gap * 1.3)])}
       />
-      <Dimension
-        from={heelEdge(tip)}
-        to={heelEdge(plan.heel)}
-        text={`heel ${show(results.heelDepth)}`}
-        at={[heelEdge(plan.heel)[0] + 10, heelEdge((tip + plan.heel) / 2)[1] + 5]}
-        anchor="start"
-      />
-      <Dimension
-        from={toeEdge(tip)}
-        to={toeEdge(plan.toe)}
-        text={`toe ${show(results.toeDepth)}`}
-        at={[toeEdge(plan.toe)[0] - 12, toeEdge((tip + plan.toe) / 2)[1] - 4]}
-        anchor="end"
-      />
+      <DepthDimension plan={plan} side={1} text={`heel ${show(results.heelDepth)}`} />
+      <DepthDimension plan={plan} side={-1} text={`toe ${show(results.toeDepth)}`} />
       <AngleArc plan={plan} angle={inputs.angle} />
       <path
         className="line-dimension"
@@ -188,6 +174,38 @@ function breakLine([x1, y1]: Spot, [x2, y2]: Spot): string {
   return `M${point(0, 0)}C${point(0.25, 1)} ${point(0.4, 1)} ${point(0.5, 0)}S${point(0.75, -1)} ${point(1, 0)}`;
 }
 
+/** Below this angle the branch lies over the place above the heel, and its figure goes below the header. */
+const steep = 50;
+const textWidth = (text: string) => text.length * 9;
+
+/** How deep the heel (side 1) or toe (−1) is cut, its figure where no line of the joint runs. */
+function DepthDimension({ plan, side, text }: { plan: Plan; side: 1 | -1; text: string }) {
+  const { tube, results, at, flat, gap } = plan;
+  const edge = side === 1 ? plan.heel : plan.toe;
+  const from = at(results.tipFromAxis, side * (tube.r + gap));
+  const to = at(edge, side * (tube.r + gap));
+  const witness = at(edge, side * (tube.r + gap * 1.3));
+  const above = flat(0, tube.R)[1] - 9;
+  const room = textWidth(text) + 4;
+  if (side === -1) {
+    const place: Spot = [Math.max(room, witness[0] - 5), Math.min(witness[1] - 5, above)];
+    return <Dimension from={from} to={to} text={text} at={place} anchor="end" />;
+  }
+  if (Math.atan2(tube.sin, tube.cos) * 180 >= steep * Math.PI) {
+    const place: Spot = [Math.min(view.width - room, witness[0] + 5), above];
+    return <Dimension from={from} to={to} text={text} at={place} anchor="start" />;
+  }
+  const middle: Spot = [(from[0] + to[0]) / 2, (from[1] + to[1]) / 2];
+  const below = flat(0, -tube.R)[1] + 24;
+  const x = Math.min(view.width - room / 2, Math.max(room / 2, middle[0]));
+  return (
+    <>
+      <path className="line-dimension" d={linePath([middle, [x, below - 14]])} />
+      <Dimension from={from} to={to} text={text} at={[x, below]} />
+    </>
+  );
+}
+
 function AngleArc({ plan, angle }: { plan: Plan; angle: number }) {
   const { tube, flat, scale } = plan;
   const radius = Math.min(plan.length * 0.84, plan.reach.right - 4 / scale);
@@ -195,17 +213,25 @@ function AngleArc({ plan, angle }: { plan: Plan; angle: number }) {
     const radians = (degrees * Math.PI) / 180;
     return flat((radius + out) * Math.cos(radians), (radius + out) * Math.sin(radians));
   };
-  // From clear of the header up to the branch's own axis.
-  const from = Math.min(angle * 0.9, (Math.asin(Math.min(0.95, tube.R / radius)) * 180) / Math.PI + 4);
+  // From clear of the header, and of the figure above it, up to the branch's own axis.
+  const clear = Math.min(0.95, (tube.R + 28 / scale) / radius);
+  const from = Math.min(angle * 0.8, (Math.asin(clear) * 180) / Math.PI);
   const [start, end] = [spot(from), spot(angle)];
-  const label = spot((from + angle) / 2 - (angle > 60 ? 10 : 0), 10 / scale);
+  const text = `${angle}°`;
+  const edge = angle - (Math.asin(Math.min(1, tube.r / radius)) * 180) / Math.PI;
+  const beyond = plan.at(plan.length * 1.06, 0);
+  // Right of the arc where that is clear of the branch, else at the end of the branch's axis.
+  const label: Spot =
+    angle >= steep
+      ? spot(Math.min((from + angle) / 2, edge - 5), 8 / scale)
+      : [Math.min(view.width - textWidth(text), beyond[0] + 6), beyond[1] + 2];
   return (
     <>
       <path
         className="line-dimension"
         d={`M${start[0].toFixed(2)} ${start[1].toFixed(2)}A${radius * scale} ${radius * scale} 0 0 0 ${end[0].toFixed(2)} ${end[1].toFixed(2)}`}
       />
-      <Figure at={label}>{`${angle}°`}</Figure>
+      <Figure at={label}>{text}</Figure>
     </>
   );
 }
