@@ -11,24 +11,24 @@ import { regroup } from "./block-commands.ts";
  */
 export const TidyBlocks = Extension.create({
   name: "tidyBlocks",
-  addProseMirrorPlugins() {
-    const ownIds = new Set<string>();
-    return [
-      new Plugin({
-        state: {
-          init: (_, state) => collectIds(state.doc, ownIds),
-          apply: (tr) => (tr.docChanged ? collectIds(tr.doc, ownIds) : ownIds),
-        },
-        props: {
-          // What comes from another entry is a new working here; what was cut here and comes back is the same one.
-          transformPasted: (slice) => withNewIds(slice, (id) => !ownIds.has(id)),
-        },
-        appendTransaction: (transactions, _, state) =>
-          transactions.some((transaction) => transaction.docChanged) ? tidied(state) : null,
-      }),
-    ];
-  },
+  addProseMirrorPlugins: () => [tidyBlocks()],
 });
+
+export function tidyBlocks(): Plugin {
+  const ownIds = new Set<string>();
+  return new Plugin({
+    state: {
+      init: (_, state) => collectIds(state.doc, ownIds),
+      apply: (tr) => (tr.docChanged ? collectIds(tr.doc, ownIds) : ownIds),
+    },
+    props: {
+      // What comes from another entry is a new working here; what was cut here and comes back is the same one.
+      transformPasted: (slice) => withNewIds(slice, (id) => !ownIds.has(id)),
+    },
+    appendTransaction: (transactions, _, state) =>
+      transactions.some((transaction) => transaction.docChanged) ? tidied(state) : null,
+  });
+}
 
 function collectIds(doc: Node, ids: Set<string>): Set<string> {
   doc.descendants((node) => {

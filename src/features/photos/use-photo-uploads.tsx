@@ -109,9 +109,11 @@ function photoBlock(photoId: string): DocumentNode {
 
 /** Photos in groups of two to six, as even as can be; a single one stays alone. */
 export function groupsOf(photos: DocumentNode[]): DocumentNode[] {
-  const groups = Math.ceil(photos.length / mostInGroup);
-  const size = Math.ceil(photos.length / Math.max(1, groups));
-  return Array.from({ length: groups }, (_, index) => photos.slice(index * size, (index + 1) * size)).flatMap(
-    (group) => (group.length < 2 ? group : [{ type: "photoGroup", content: group }]),
-  );
+  if (photos.length < 2) return photos;
+  const count = Math.ceil(photos.length / mostInGroup);
+  const startOf = (group: number) => Math.floor((group * photos.length) / count);
+  return Array.from({ length: count }, (_, group) => ({
+    type: "photoGroup",
+    content: photos.slice(startOf(group), startOf(group + 1)),
+  }));
 }
