@@ -62,10 +62,11 @@ export function ErrorPage() {
               </a>
             ) : null}
             <LinkButton to={paths.home()}>Go to the front page</LinkButton>
+            {way === undefined ? <LinkButton to={paths.builds()}>See all builds</LinkButton> : null}
           </>
         }
       >
-        {way === undefined ? <p>The builds that are public are all in the list of builds.</p> : null}
+        {null}
       </State>
     </div>
   );

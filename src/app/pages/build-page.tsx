@@ -81,7 +81,7 @@ function BuildHead({ build, now }: { build: BuildPage; now: number }) {
             )}
           </p>
         </div>
-        <div className="mt-5 flex flex-wrap gap-2">
+        <div className="no-print mt-5 flex flex-wrap gap-2">
           <StartReading build={build} />
           {build.mine ? <LinkButton to={paths.ownBuild(build.slug)}>Edit this build</LinkButton> : null}
         </div>

@@ -36,9 +36,9 @@ export function Component() {
       <LatestEntries />
       <LatestBuilds />
       {viewer ? (
-        <div className="mt-16">
+        <section aria-label="A working to try" className="mt-16 max-w-wide">
           <LiveWorking />
-        </div>
+        </section>
       ) : (
         <ForBuilders />
       )}

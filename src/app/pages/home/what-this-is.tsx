@@ -5,7 +5,7 @@ import { LiveWorking } from "./live-working.tsx";
 /** What this is, shown by a working that works. */
 export function WhatThisIs() {
   return (
-    <section className="grid gap-x-12 gap-y-8 lg:grid-cols-[minmax(0,20rem)_minmax(0,1fr)]">
+    <section className="grid gap-x-12 gap-y-8 lg:grid-cols-[minmax(0,18rem)_minmax(0,1fr)]">
       <div className="lg:sticky lg:top-8 lg:self-start">
         <h1>Build diaries with the numbers left in</h1>
         <p className="mt-5 font-serif text-base">
