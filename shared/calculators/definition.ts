@@ -22,6 +22,8 @@ export interface ResultField {
   unit: string;
   decimals: number;
   meaning: string;
+  /** Shown large beside the drawing. When none is marked, the first rows are. */
+  headline?: true;
   /** Heading over a run of rows that belong together; the first rows need none. */
   section?: string;
 }

@@ -1,21 +1,32 @@
+import { clsx } from "clsx";
 import type { ReactNode } from "react";
 import { Mark } from "./mark.tsx";
 
-type CautionProps = { title?: string; children: ReactNode };
+type CautionProps = {
+  title?: string;
+  /** Smaller and closer, where a page has many. */
+  compact?: boolean;
+  children: ReactNode;
+};
 
 /** The trade's caution: a chisel cut and a punch mark on straw. Stays in view; there is nothing to dismiss. */
-export function Caution({ title = "Caution", children }: CautionProps) {
+export function Caution({ title = "Caution", compact = false, children }: CautionProps) {
   return (
     <aside
       aria-label={title}
       className="flex overflow-hidden rounded bg-straw-wash font-sans text-sm text-ink"
     >
-      <div className="flex w-9 shrink-0 items-start justify-center bg-straw-fill pt-3.5 text-on-straw">
-        <Mark shape="chisel" className="size-5" />
+      <div
+        className={clsx(
+          "flex shrink-0 items-start justify-center bg-straw-fill text-on-straw",
+          compact ? "w-7 pt-2" : "w-9 pt-3.5",
+        )}
+      >
+        <Mark shape="chisel" className={compact ? "size-4" : "size-5"} />
       </div>
-      <div className="min-w-0 flex-1 px-4 py-3">
+      <div className={clsx("min-w-0 flex-1", compact ? "px-3 py-2 text-xs leading-snug" : "px-4 py-3")}>
         <p className="font-semibold">{title}</p>
-        <div className="mt-0.5 flex max-w-measure flex-col gap-1.5">{children}</div>
+        <div className={clsx("mt-0.5 flex flex-col gap-1.5", !compact && "max-w-measure")}>{children}</div>
       </div>
     </aside>
   );

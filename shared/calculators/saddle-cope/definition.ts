@@ -30,6 +30,7 @@ export const saddleCope = defineCalculator({
   resultFields: [
     {
       name: "deepest",
+      headline: true,
       label: "Deepest cut",
       unit: "mm",
       decimals: 1,
@@ -42,17 +43,33 @@ export const saddleCope = defineCalculator({
       decimals: 0,
       meaning: "Round the branch from the heel.",
     },
-    { name: "heelDepth", label: "Depth at heel", unit: "mm", decimals: 1, meaning: "On the acute side." },
+    {
+      name: "heelDepth",
+      headline: true,
+      label: "Depth at heel",
+      unit: "mm",
+      decimals: 1,
+      meaning: "On the acute side.",
+    },
     {
       name: "sideDepth.at90",
+      headline: true,
       label: "Depth at 90° side",
       unit: "mm",
       decimals: 1,
       meaning: "A quarter turn from the heel.",
     },
-    { name: "toeDepth", label: "Depth at toe", unit: "mm", decimals: 1, meaning: "On the obtuse side." },
+    {
+      name: "toeDepth",
+      headline: true,
+      label: "Depth at toe",
+      unit: "mm",
+      decimals: 1,
+      meaning: "On the obtuse side.",
+    },
     {
       name: "sideDepth.at270",
+      headline: true,
       label: "Depth at 270° side",
       unit: "mm",
       decimals: 1,
@@ -75,6 +92,7 @@ export const saddleCope = defineCalculator({
     {
       section: "Once round",
       name: "templateWidth",
+      headline: true,
       label: "Wrap length",
       unit: "mm",
       decimals: 1,

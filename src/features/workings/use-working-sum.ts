@@ -17,12 +17,17 @@ interface SumState {
   issue: CalculatorIssue | null;
 }
 
-/** The sum while it is being changed: what is typed, the last numbers that worked, and what is wrong now. */
+/**
+ * The sum while it is being changed: what is typed, the last numbers that worked, and what is wrong now.
+ *
+ * @param begunWith what stands in the fields at first, in place of the kept inputs
+ */
 export function useWorkingSum(
   definition: CalculatorDefinition,
   kept: Numbers,
   units: LengthUnits,
   onInputsChange?: (inputs: Record<string, unknown>) => void,
+  begunWith?: Typed,
 ) {
   const from = JSON.stringify(kept.inputs);
   const fresh = (): SumState => ({
@@ -32,7 +37,7 @@ export function useWorkingSum(
     shown: kept,
     issue: null,
   });
-  const [stored, setState] = useState(fresh);
+  const [stored, setState] = useState(() => (begunWith ? worked(begunWith, kept) : fresh()));
   const state = follow(stored);
 
   /** Takes over what changed outside: other units, or numbers that this panel did not send itself (an undo). */
@@ -44,24 +49,29 @@ export function useWorkingSum(
 
   const first = typedFrom(definition, kept.inputs, units);
 
-  const change = (name: string, text: string) => {
-    const typed = { ...state.typed, [name]: text };
-    const worked = workTyped(definition, typed, units, state.shown.inputs);
-    setState({
+  /** The sum of what is typed; while that does not work the numbers before stay shown. */
+  function worked(typed: Typed, before: Numbers): SumState {
+    const run = workTyped(definition, typed, units, before.inputs);
+    return {
       from,
       units,
       typed,
-      shown: worked.ok ? worked.value : state.shown,
-      issue: worked.ok ? null : worked.issue,
-    });
-    if (worked.ok) onInputsChange?.(worked.value.inputs);
+      shown: run.ok ? run.value : before,
+      issue: run.ok ? null : run.issue,
+    };
+  }
+
+  const change = (typed: Typed) => {
+    const next = worked(typed, state.shown);
+    setState(next);
+    if (!next.issue) onInputsChange?.(next.shown.inputs);
   };
 
   return {
     typed: state.typed,
     shown: state.shown,
     issue: state.issue,
-    changed: Object.keys(first).some((name) => first[name] !== state.typed[name]),
+    changed: Object.keys({ ...first, ...state.typed }).some((name) => first[name] !== state.typed[name]),
     change,
     putBack: () => setState(fresh()),
   };

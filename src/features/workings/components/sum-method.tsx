@@ -31,8 +31,8 @@ export function SumMethod({ definition }: { definition: CalculatorDefinition }) 
 /** What can hurt someone: always in view. */
 export function SumCautions({ cautions }: { cautions: readonly string[] }) {
   return (
-    <Caution>
-      <ul className="flex list-disc flex-col gap-1 pl-4 text-xs">
+    <Caution compact>
+      <ul className="list-disc gap-x-8 space-y-0.5 pl-4 @2xl:columns-2 *:break-inside-avoid">
         {cautions.map((caution) => (
           <li key={caution}>{caution}</li>
         ))}

@@ -24,6 +24,31 @@ export function resultWords({ name, unit, decimals }: ResultField, results: obje
   return { figure: value.toFixed(decimals), unit };
 }
 
+/** The results a person looks for first. */
+export function headlinesOf(fields: readonly ResultField[]): readonly ResultField[] {
+  const marked = fields.filter((field) => field.headline);
+  return marked.length > 0 ? marked : fields.filter((field) => !field.section).slice(0, 6);
+}
+
+/** The results a person looks for first, large, beside the drawing that shows them. */
+export function SumHeadlines({ fields, results, units }: SumResultsProps) {
+  return (
+    <dl className="grid grid-cols-[repeat(auto-fit,minmax(min(8rem,100%),1fr))] gap-x-4 gap-y-2">
+      {headlinesOf(fields).map((field) => {
+        const words = resultWords(field, results, units);
+        return words ? (
+          <div key={field.name} className="flex flex-col justify-between border-l-2 border-edge pl-2.5">
+            <dt className="text-xs leading-tight text-ink-soft">{field.label}</dt>
+            <dd className="figures text-base leading-tight font-semibold whitespace-nowrap">
+              {words.figure} <span className="text-xs font-normal text-ink-soft">{words.unit}</span>
+            </dd>
+          </div>
+        ) : null;
+      })}
+    </dl>
+  );
+}
+
 /** Every number the sum gave, in runs under their headings. */
 export function SumResults({ fields, results, units }: SumResultsProps) {
   const sections = [...new Set(fields.map((field) => field.section))];
@@ -53,7 +78,7 @@ function ResultRow({ field, words }: { field: ResultField; words: ReturnType<typ
     <tr className="border-t border-hairline">
       <th scope="row" className="py-1.5 pr-3 text-left align-baseline font-normal">
         {field.label}
-        <span className="sr-only text-xs text-ink-soft @sm:not-sr-only @sm:block">{field.meaning}</span>
+        <span className="block text-xs text-ink-soft">{field.meaning}</span>
       </th>
       <td className="figures py-1.5 text-right align-baseline font-semibold whitespace-nowrap">
         {words.figure}{" "}

@@ -4,6 +4,7 @@ import type { CalculatorDefinition } from "#shared/calculators/definition.ts";
 import { findCalculator } from "#shared/calculators/registry.ts";
 import { formatLength, type LengthUnits } from "#shared/units/length.ts";
 import { Button } from "#src/components/button.tsx";
+import { Disclosure } from "#src/components/disclosure.tsx";
 import { LiveRegion } from "#src/components/live-region.tsx";
 import { Notice } from "#src/components/notice.tsx";
 import { NumberTag } from "#src/components/number-tag.tsx";
@@ -13,7 +14,7 @@ import { useWorkingSum } from "../use-working-sum.ts";
 import { SolidView } from "./solid-view.tsx";
 import { SumFields } from "./sum-fields.tsx";
 import { SumCautions, SumMethod, SumSteps } from "./sum-method.tsx";
-import { resultWords, SumResults } from "./sum-results.tsx";
+import { headlinesOf, resultWords, SumHeadlines, SumResults } from "./sum-results.tsx";
 import { TemplateLinks } from "./template-links.tsx";
 
 export interface PanelWorking {
@@ -62,6 +63,8 @@ function Panel({
   const sum = useWorkingSum(definition, working, units, onInputsChange);
   const drawing = drawings[definition.id];
   const shown = { inputs: sum.shown.inputs, results: sum.shown.results, units };
+  const beside =
+    drawing && definition.fields.every((field) => field.kind !== "point" && field.kind !== "list");
   const live = useIsLive();
   const stale = sum.issue !== null;
   return (
@@ -82,35 +85,43 @@ function Panel({
         ) : null
       }
     >
-      <div className={clsx("-mx-3 -mt-3 transition-opacity sm:-mx-4 sm:-mt-4", stale && "opacity-45")}>
-        {drawing ? <drawing.flat {...shown} /> : null}
-      </div>
-      {drawing?.solid && live ? <SolidView solid={drawing.solid} {...shown} /> : null}
-      <div className="flex flex-col gap-6">
-        <form
-          className="flex flex-col gap-4"
-          aria-label={`Inputs of ${working.title || definition.name}`}
-          onSubmit={(event) => event.preventDefault()}
+      {/* With the room for it, the numbers stand beside the drawing that they move. */}
+      <div className={clsx("grid gap-4", beside && "@3xl:grid-cols-[minmax(0,1fr)_18.5rem]")}>
+        <div
+          className={clsx("-mx-3 -mt-3 min-w-0 transition-opacity sm:-mx-4 sm:-mt-4", stale && "opacity-45")}
         >
-          <SumFields
-            fields={definition.fields}
-            typed={sum.typed}
-            issue={sum.issue}
-            units={units}
-            onChange={sum.change}
-          />
-          {stale ? (
-            <StaleNotice issue={sum.issue} known={definition.fields.map((field) => field.name)} />
-          ) : null}
-          {mode === "read" && sum.changed ? (
-            <Button onClick={sum.putBack}>Put back the builder's numbers</Button>
-          ) : null}
-        </form>
-        <div className={clsx("flex flex-col gap-4 transition-opacity", stale && "opacity-45")}>
-          <SumResults fields={definition.resultFields} {...shown} />
+          {drawing ? <drawing.flat {...shown} /> : null}
+        </div>
+        <div className="@container flex min-w-0 flex-col gap-4">
+          <div className={clsx("transition-opacity", stale && "opacity-45")}>
+            <SumHeadlines fields={definition.resultFields} {...shown} />
+          </div>
+          <form
+            className="flex flex-col gap-3"
+            aria-label={`Inputs of ${working.title || definition.name}`}
+            onSubmit={(event) => event.preventDefault()}
+          >
+            <SumFields
+              fields={definition.fields}
+              typed={sum.typed}
+              issue={sum.issue}
+              units={units}
+              onChange={sum.change}
+            />
+            {stale ? <StaleNotice issue={sum.issue} placed={Object.keys(sum.typed)} /> : null}
+            {mode === "read" && sum.changed ? (
+              <Button onClick={sum.putBack}>Put back the builder's numbers</Button>
+            ) : null}
+          </form>
         </div>
       </div>
-      <div>
+      {drawing?.solid && live ? <SolidView solid={drawing.solid} {...shown} /> : null}
+      <div className="-space-y-px">
+        <Disclosure summary="All results" className="shown-on-paper">
+          <div className={clsx("transition-opacity", stale && "opacity-45")}>
+            <SumResults fields={definition.resultFields} {...shown} />
+          </div>
+        </Disclosure>
         <Steps definition={definition} {...shown} />
         <SumMethod definition={definition} />
       </div>
@@ -125,14 +136,14 @@ function Panel({
 
 function StaleNotice({
   issue,
-  known,
+  placed,
 }: {
   issue: { field: string; message: string } | null;
-  known: string[];
+  placed: string[];
 }) {
   return (
     <Notice kind="attention" title="Not worked out">
-      {issue && !known.includes(issue.field)
+      {issue && !placed.includes(issue.field)
         ? issue.message
         : "The drawing and results are of the last numbers that worked."}
     </Notice>
@@ -155,8 +166,7 @@ function Steps({
 }
 
 function spoken(definition: CalculatorDefinition, results: object, units: LengthUnits): string {
-  return definition.resultFields
-    .filter((field) => !field.section)
+  return headlinesOf(definition.resultFields)
     .slice(0, 4)
     .map((field) => {
       const words = resultWords(field, results, units);

@@ -1,8 +1,9 @@
 import { describe, expect, it } from "vitest";
 import type { InputField } from "#shared/calculators/inputs.ts";
 import { findCalculator } from "#shared/calculators/registry.ts";
-import { stepped, typedFrom, workTyped } from "#src/features/workings/sum.ts";
+import { typedFrom, workTyped } from "#src/features/workings/sum.ts";
 import { templateAddresses } from "#src/features/workings/template-addresses.ts";
+import { stepped } from "#src/features/workings/typed-number.ts";
 
 const definition = findCalculator("saddle-cope");
 if (!definition) throw new Error("there is no saddle-cope");
@@ -47,7 +48,7 @@ describe("workTyped", () => {
   it("names the field and asks for a number when it is none", () => {
     expect(work({ angle: "steep" })).toEqual({
       ok: false,
-      issue: { field: "angle", message: "Angle between the axes: type a number, such as 60." },
+      issue: { field: "angle", message: "Angle between the axes: type a number, such as 60 or 48/2." },
     });
   });
 
