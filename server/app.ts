@@ -12,6 +12,7 @@ import { schedulePurge } from "./features/entries/purge.ts";
 import { feedRoutes } from "./features/feeds/routes.ts";
 import { photoFiles } from "./features/photos/files.ts";
 import { scheduleCleaning } from "./features/photos/jobs.ts";
+import { numberFiles } from "./features/workings/number-files.ts";
 import { templateFiles } from "./features/workings/template-files.ts";
 import { createFeatures } from "./features.ts";
 import type { ClientBuild } from "./http/client-build.ts";
@@ -59,9 +60,11 @@ export function createApp({ config, database, log, clock, client }: AppParts) {
   app.post("/sign-out", signOutForm(auth));
   app.use(sessionMiddleware(auth));
   app.use(apiRouter(routes));
-  app.use(templateFiles({ workings, clock }));
-  app.use("/api", () => {
-    throw new AppError("not_found", "There is no such route.");
+  app.use(templateFiles({ workings, clock }), numberFiles({ workings }));
+  app.use("/api", (req, _res, next) => {
+    // The page that describes the API stands at /api itself.
+    if (req.path !== "/") throw new AppError("not_found", "There is no such route.");
+    next();
   });
   app.use(pageChoices());
   app.use(photoFiles({ photos, storage, log }));

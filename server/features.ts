@@ -1,5 +1,7 @@
 import { join } from "node:path";
 import type { Logger } from "pino";
+import { calculators } from "#shared/calculators/registry.ts";
+import { getApiDescription } from "#shared/contracts/api-description.ts";
 import { getHealth } from "#shared/contracts/health.ts";
 import type { Config } from "./config/environment.ts";
 import type { Database } from "./db/client.ts";
@@ -21,6 +23,7 @@ import { createIncoming } from "./features/photos/upload.ts";
 import { workingRoutes } from "./features/workings/routes.ts";
 import { createWorkingService } from "./features/workings/service.ts";
 import { type Route, route } from "./http/endpoints.ts";
+import { describeApi } from "./http/openapi.ts";
 import type { Queue } from "./jobs/queue.ts";
 import { createMail } from "./mail/mail.ts";
 import type { Storage } from "./storage/storage.ts";
@@ -56,7 +59,7 @@ export function createFeatures({ config, database, log, clock, queue, storage }:
   });
   const demoLoaded = config.DEMO && demoState(database) === "loaded";
 
-  const routes: Route[] = [
+  const described: Route[] = [
     route(getHealth, () => ({ ok: true as const, dueJobs: queue.dueCount() })),
     ...accountRoutes(accounts, () => (demoLoaded ? [...demoPeople] : [])),
     ...buildRoutes(builds, stages),
@@ -64,5 +67,11 @@ export function createFeatures({ config, database, log, clock, queue, storage }:
     ...photoRoutes(photos, incoming),
     ...workingRoutes(workings),
   ];
+  const description = describeApi({
+    endpoints: [...described.map(({ endpoint }) => endpoint), getApiDescription],
+    calculators,
+    siteUrl: config.SITE_URL,
+  });
+  const routes = [...described, route(getApiDescription, () => description)];
   return { mail, auth, photos, entries, workings, routes };
 }

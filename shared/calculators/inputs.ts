@@ -50,7 +50,8 @@ export type InputField =
   | (FieldBase & TextSpec & { kind: "text" })
   | (FieldBase & { kind: "point"; axes: readonly InputField[] })
   | (FieldBase & { kind: "group"; fields: readonly InputField[] })
-  | (FieldBase & { kind: "list"; item: InputField });
+  /** `single`: one value in place of the list counts for all. */
+  | (FieldBase & { kind: "list"; item: InputField; single?: true });
 
 const between = ({ label, min, max, unit }: NumberSpec) =>
   `${label} must be between ${min} and ${max}${unit && ` ${unit}`}.`;
@@ -120,7 +121,8 @@ function describeField(name: string, schema: z.ZodType): InputField {
   const field = fallback === undefined ? base : { ...base, default: fallback };
   if (inner instanceof z.ZodObject) return { ...field, kind: "group", fields: describeInputs(inner) };
   if (inner instanceof z.ZodArray) {
-    return { ...field, kind: "list", item: describeField("item", inner.element as z.ZodType) };
+    const item = describeField("item", inner.element as z.ZodType);
+    return { ...field, kind: "list", item, ...(list && { single: true }) };
   }
   if (inner instanceof z.ZodTuple) {
     const axes = inner.def.items.map((item, index) => describeField(String(index), item as z.ZodType));

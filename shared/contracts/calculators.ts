@@ -19,3 +19,23 @@ export const workSum = endpoint({
   body: z.unknown(),
   response: z.record(z.string(), z.unknown()),
 });
+
+/** Every calculator, in the order of the bench. */
+export const listCalculators = endpoint({
+  method: "GET",
+  path: "/api/calculators",
+  access: "anyone",
+  summary: "List the calculators",
+  response: z.object({
+    items: z.array(
+      z.object({
+        id: z.string(),
+        version: z.number(),
+        name: z.string(),
+        purpose: z.string(),
+        group: z.string(),
+        words: z.array(z.string()),
+      }),
+    ),
+  }),
+});

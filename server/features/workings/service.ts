@@ -1,6 +1,7 @@
 import type { Database } from "#server/db/client.ts";
 import { AppError } from "#server/http/errors.ts";
 import type { Viewer } from "#server/http/viewer.ts";
+import { inputsFromAddress } from "#shared/calculators/address.ts";
 import type { CalculatorIssue } from "#shared/calculators/definition.ts";
 import { type CalculatorRun, findCalculator, runCalculator } from "#shared/calculators/registry.ts";
 import { findPlacedWorking, type PlacedWorking } from "./repository.ts";
@@ -53,10 +54,10 @@ export function createWorkingService({ database, canReadEntry }: WorkingParts) {
     work,
 
     /** A kept working with some inputs changed by whoever reads it. */
-    ofWorking(viewer: Viewer, id: string, changes: Record<string, unknown>): TemplateSubject {
+    ofWorking(viewer: Viewer, id: string, changes: Changes): TemplateSubject {
       const placed = findPlacedWorking(database, id);
       const { calculator, title, inputs } = seen(viewer, placed);
-      const run = work(calculator, { ...inputs, ...changes });
+      const run = work(calculator, { ...inputs, ...read(calculator, changes) });
       const name = title || findCalculator(calculator)?.name || calculator;
       return {
         run,
@@ -67,11 +68,23 @@ export function createWorkingService({ database, canReadEntry }: WorkingParts) {
     },
 
     /** A sum that is kept nowhere. */
-    ofCalculator(calculator: string, inputs: Record<string, unknown>): TemplateSubject {
+    ofCalculator(calculator: string, inputs: Changes): TemplateSubject {
       const name = findCalculator(calculator)?.name ?? calculator;
-      return { run: work(calculator, inputs), build: "From the bench", working: name, fileName: calculator };
+      return {
+        run: work(calculator, read(calculator, inputs)),
+        build: "From the bench",
+        working: name,
+        fileName: calculator,
+      };
     },
   };
+}
+
+/** Inputs as they stand in an address, by dotted name. */
+type Changes = Iterable<readonly [string, unknown]>;
+
+function read(calculator: string, pairs: Changes): Record<string, unknown> {
+  return inputsFromAddress(findCalculator(calculator)?.fields ?? [], pairs);
 }
 
 function badInput({ field, message }: CalculatorIssue): AppError {

@@ -100,13 +100,9 @@ function pdfLimit() {
   });
 }
 
-/** The calculators' schemas take numbers; an address only has words. */
-function readQuery({ paper, ...rest }: Record<string, unknown>) {
-  const inputs = Object.entries(rest).map(([name, value]) => {
-    const number = typeof value === "string" && value.trim() !== "" ? Number(value) : Number.NaN;
-    return [name, Number.isNaN(number) ? value : number] as const;
-  });
-  return { paper, inputs: Object.fromEntries(inputs) };
+/** The paper is the file's; everything else in the query is an input. */
+function readQuery({ paper, ...inputs }: Record<string, unknown>) {
+  return { paper, inputs: Object.entries(inputs) };
 }
 
 function printedDate(moment: number): string {

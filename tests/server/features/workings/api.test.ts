@@ -5,13 +5,14 @@ import { XMLValidator } from "fast-xml-parser";
 import { pino } from "pino";
 import { v7 as uuid } from "uuid";
 import { describe, expect, it, onTestFinished } from "vitest";
+import { numberFiles } from "#server/features/workings/number-files.ts";
 import { workingRoutes } from "#server/features/workings/routes.ts";
 import { createWorkingService } from "#server/features/workings/service.ts";
 import { templateFiles } from "#server/features/workings/template-files.ts";
 import { apiRouter } from "#server/http/endpoints.ts";
 import { handleErrors } from "#server/http/errors.ts";
 import type { Person } from "#server/http/viewer.ts";
-import { runCalculator } from "#shared/calculators/registry.ts";
+import { calculatorIds, runCalculator } from "#shared/calculators/registry.ts";
 import { publish, saveOver, startBuild, startEntry, workingBlock } from "#tests/factories/content.ts";
 import { contentBench } from "#tests/setup/content-bench.ts";
 
@@ -33,6 +34,7 @@ async function shop() {
   app.use(
     apiRouter(workingRoutes(workings)),
     templateFiles({ workings, clock: () => Date.UTC(2026, 11, 1) }),
+    numberFiles({ workings }),
   );
   app.use(handleErrors(pino({ level: "silent" })));
   const server = app.listen(0);
@@ -202,5 +204,61 @@ describe("GET /api/workings/:working/template/:format", () => {
     await bench.send(maren, "POST", `/api/entries/${draft.id}/withdraw`);
     expect((await get(`/api/workings/${id}/template/svg`)).status).toBe(404);
     expect((await get("/api/workings/none/template/svg")).status).toBe(404);
+  });
+});
+
+describe("GET /api/calculators/:calculator/numbers/:format", () => {
+  const query = "headerOd=44.5&branchOd=38.1&branchWall=2.5&angle=60";
+
+  it("sends the whole sum as JSON", async () => {
+    const { get } = await shop();
+    const answer = await get(`/api/calculators/saddle-cope/numbers/json?${query}`);
+    const run = runCalculator("saddle-cope", inputs);
+    expect(answer.headers.get("content-disposition")).toBe('attachment; filename="saddle-cope-numbers.json"');
+    expect(await answer.json()).toEqual(JSON.parse(JSON.stringify(run.ok && run.value)));
+  });
+
+  it("sends a row a number as CSV, with label and unit", async () => {
+    const { get } = await shop();
+    const answer = await get(`/api/calculators/saddle-cope/numbers/csv?${query}`);
+    expect(answer.headers.get("content-type")).toBe("text/csv; charset=utf-8");
+    const lines = (await answer.text()).split("\r\n");
+    expect(lines[0]).toBe("kind,name,label,value,unit");
+    expect(lines).toContain("input,angle,Angle between the axes,60,°");
+    expect(lines.find((line) => line.startsWith("result,deepest,"))).toMatch(/,Deepest cut,25\.19\d*,mm$/);
+  });
+
+  it("takes a sum with lists in it", async () => {
+    const { get } = await shop();
+    const search = "flanges.0=20&flanges.1=30&angles.0=90&thickness=2&insideRadius=2&kFactor=0.45";
+    const answer = await get(`/api/calculators/sheet-bend/numbers/json?${search}`);
+    expect((await answer.json()).inputs).toMatchObject({ flanges: [20, 30], angles: [90] });
+  });
+
+  it("refuses a format it does not have and names the field at fault", async () => {
+    const { get } = await shop();
+    expect((await get(`/api/calculators/saddle-cope/numbers/xml?${query}`)).status).toBe(422);
+    const answer = await get("/api/calculators/saddle-cope/numbers/csv?headerOd=wide");
+    expect((await answer.json()).error.field).toBe("headerOd");
+  });
+});
+
+describe("GET /api/workings/:working/numbers/:format", () => {
+  it("keeps a draft's numbers to its builder and gives published ones to anyone", async () => {
+    const { get, maren, id, publish: publishIt } = await keptWorking();
+    const path = `/api/workings/${id}/numbers/json`;
+    expect((await get(path)).status).toBe(404);
+    expect((await get(path, maren)).status).toBe(200);
+    await publishIt();
+    expect((await (await get(path)).json()).inputs).toMatchObject(inputs);
+  });
+});
+
+describe("GET /api/calculators", () => {
+  it("lists every calculator with the words that find it", async () => {
+    const { get } = await shop();
+    const { items } = await (await get("/api/calculators")).json();
+    expect(items.map(({ id }: { id: string }) => id)).toEqual(calculatorIds);
+    expect(items[0]).toMatchObject({ id: "saddle-cope", words: expect.arrayContaining(["fishmouth"]) });
   });
 });
