@@ -32,7 +32,7 @@ function WorkingBlock({ workingId }: WorkingAttributes) {
             working: { ...working, number: null },
             mode: "read",
             units,
-            templateBase: `/api/workings/${working.id}/template`,
+            apiBase: `/api/workings/${working.id}`,
           }}
         />
       </div>

@@ -13,7 +13,10 @@ import { PendingBar } from "./pending-bar.tsx";
 import { UnitsSwitch } from "./units-switch.tsx";
 import { useMenuClosing, usePageChange } from "./use-page-change.ts";
 
-const siteLinks = [{ label: "Builds", to: paths.builds() }];
+const siteLinks = [
+  { label: "Builds", to: paths.builds() },
+  { label: "Bench", to: paths.bench() },
+];
 
 /** Skip link, header, page and footer. */
 export function Layout() {
@@ -99,7 +102,10 @@ function Footer() {
   return (
     <SiteFooter
       groups={[
-        { title: "Read", links: [{ label: "Front page", to: paths.home() }, ...siteLinks] },
+        {
+          title: "Read",
+          links: [{ label: "Front page", to: paths.home() }, ...siteLinks, { label: "API", to: paths.api() }],
+        },
         { title: "You", links: you },
         ...(fakes ? [standIns] : []),
       ]}

@@ -9,6 +9,12 @@ export const paths = {
   /** The place of a stage on its build's page. */
   stage: (build: string, stageId: string) => `/builds/${build}#stage-${stageId}`,
   entry: (build: string, entry: string) => `/builds/${build}/entries/${entry}`,
+  bench: () => "/bench",
+  calculator: (id: string, query = "") => `/bench/${id}${query && `?${query}`}`,
+  /** Where a kept working's templates are, without the format. */
+  workingTemplate: (workingId: string) => `/api/workings/${workingId}/template`,
+  api: () => "/api",
+  apiDescription: () => "/api/openapi.json",
   person: (handle: string) => `/people/${handle}`,
   signIn: (next?: string) => (next ? `/sign-in?next=${encodeURIComponent(next)}` : "/sign-in"),
   /** Takes a form without JavaScript. */

@@ -8,7 +8,7 @@ export const mitre = defineCalculator({
   version: 1,
   name: "Mitre",
   purpose: "Mark and cut two equal round tubes so that they meet in a corner.",
-  group: "Tube and joints",
+  group: "Joining tubes",
   words: ["mitre", "miter", "corner", "elbow", "plane cut", "wrap template", "tube joint", "saw angle"],
   inputs: mitreInputs,
   example: { od: 44.5, wall: 2.5, turn: 90 },

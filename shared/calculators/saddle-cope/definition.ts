@@ -10,7 +10,7 @@ export const saddleCope = defineCalculator({
   version: 1,
   name: "Saddle cope",
   purpose: "Mark and cut the end of one round tube so that it sits on the side of another.",
-  group: "Tube and joints",
+  group: "Joining tubes",
   words: [
     "notch",
     "fishmouth",

@@ -8,7 +8,7 @@ export const tubePiece = defineCalculator({
   version: 1,
   name: "Tube piece",
   purpose: "Cut one round tube to length with both its ends fitted and turned to each other.",
-  group: "Tube and joints",
+  group: "Joining tubes",
   words: [
     "cut length",
     "both ends",

@@ -109,9 +109,10 @@ function readField(field: InputField, reading: Reading): Result<unknown, Calcula
     case "list": {
       const count = countOf(typed, path);
       const items = Array.from({ length: count }, () => field.item);
-      // One value for all was kept as one value: it goes back as one.
-      if (count === 1 && kept !== undefined && !Array.isArray(kept))
-        return readField(field.item, { ...reading, path: `${path}.0`, kept });
+      if (count === 1 && field.single) {
+        const alone = Array.isArray(kept) ? kept[0] : kept;
+        return readField(field.item, { ...reading, path: `${path}.0`, kept: alone });
+      }
       return count === 0 && field.optional ? ok(undefined) : readList(items, reading);
     }
     default:

@@ -1,3 +1,4 @@
+import { inputsToAddress } from "#shared/calculators/address.ts";
 import type { Paper } from "#shared/templates/tiling.ts";
 
 /** The ways a template leaves the site. */
@@ -11,19 +12,30 @@ const kinds: readonly { label: string; format: string; paper?: Paper }[] = [
 /**
  * Links to the full-size template with these numbers in it.
  *
- * @param base where this working's templates are, without the format
+ * @param base of the working or calculator in the API
  * @param inputs only what differs from what the server keeps under that address
  */
 export function templateAddresses(
   base: string,
   inputs: Record<string, unknown>,
 ): { label: string; paper?: Paper; href: string }[] {
-  return kinds.map(({ label, format, paper }) => {
-    const words = Object.entries({ ...(paper && { paper }), ...inputs }).map(([name, value]) => [
-      name,
-      String(value),
-    ]);
-    const search = new URLSearchParams(words).toString();
-    return { label, ...(paper && { paper }), href: `${base}/${format}${search && `?${search}`}` };
-  });
+  const query = inputsToAddress(inputs);
+  return kinds.map(({ label, format, paper }) => ({
+    label,
+    ...(paper && { paper }),
+    href: address(`${base}/template/${format}`, paper ? [["paper", paper], ...query] : query),
+  }));
+}
+
+/** Links to the numbers themselves. */
+export function numberAddresses(base: string, inputs: Record<string, unknown>) {
+  return [
+    { label: "CSV", href: address(`${base}/numbers/csv`, inputsToAddress(inputs)) },
+    { label: "JSON", href: address(`${base}/numbers/json`, inputsToAddress(inputs)) },
+  ];
+}
+
+function address(path: string, query: [string, string][]): string {
+  const search = new URLSearchParams(query).toString();
+  return search ? `${path}?${search}` : path;
 }

@@ -61,7 +61,7 @@ export function SumField(props: SumFieldProps) {
 type ControlParts = Pick<ComponentProps<"input">, "id" | "name" | "aria-invalid" | "aria-describedby">;
 
 function Control(props: SumFieldProps & { control: ControlParts }): ReactNode {
-  const { field, text, units, control, onChange } = props;
+  const { field, path, text, units, control, onChange } = props;
   if (field.kind === "choice") {
     return (
       <select
@@ -82,6 +82,8 @@ function Control(props: SumFieldProps & { control: ControlParts }): ReactNode {
   if (field.kind === "switch") {
     return (
       <span className="flex min-h-11 items-center">
+        {/* An empty tick box sends nothing: without JavaScript this says that it is empty. */}
+        <input type="hidden" name={path} value="false" />
         <input
           {...control}
           type="checkbox"

@@ -51,12 +51,15 @@ export function SumFields({ fields, ...props }: SumFieldsProps) {
   );
 }
 
-/** Named by what is in it: "Paper thickness and density". */
-function foldTitle(fields: readonly InputField[]): string {
-  const names = fields.map(({ label }, index) =>
-    index === 0 ? label : label.charAt(0).toLowerCase() + label.slice(1),
-  );
-  return new Intl.ListFormat("en-GB").format(names);
+/** Named by what is in it: "Paper thickness and 2 more". */
+function foldTitle([first, ...others]: readonly InputField[]): string {
+  const [second] = others;
+  if (!first || !second) return first?.label ?? "";
+  const more =
+    others.length === 1
+      ? second.label.charAt(0).toLowerCase() + second.label.slice(1)
+      : `${others.length} more`;
+  return `${first.label} and ${more}`;
 }
 
 function helpOf(fields: readonly InputField[]): { label: string; help: string }[] {

@@ -10,12 +10,16 @@ import { Notice } from "#src/components/notice.tsx";
 import { NumberTag } from "#src/components/number-tag.tsx";
 import { Plate } from "#src/components/plate.tsx";
 import { drawings } from "../drawings.ts";
+import { headlinesOf, resultWords } from "../result-words.ts";
+import type { Typed } from "../sum.ts";
 import { useWorkingSum } from "../use-working-sum.ts";
+import { FileLinks } from "./file-links.tsx";
+import { HeldNumbers } from "./held-numbers.tsx";
+import { OtherVersion } from "./other-version.tsx";
 import { SolidView } from "./solid-view.tsx";
 import { SumFields } from "./sum-fields.tsx";
 import { SumCautions, SumMethod, SumSteps } from "./sum-method.tsx";
-import { headlinesOf, resultWords, SumHeadlines, SumResults } from "./sum-results.tsx";
-import { TemplateLinks } from "./template-links.tsx";
+import { SumHeadlines, SumResults } from "./sum-results.tsx";
 
 export interface PanelWorking {
   id: string;
@@ -34,11 +38,17 @@ export interface WorkingPanelProps {
   mode: "read" | "edit";
   units: LengthUnits;
   onInputsChange?: (inputs: Record<string, unknown>) => void;
-  /** Where the kept working's templates are; without it they are drawn from the numbers alone. */
-  templateBase?: string;
+  /** The kept working in the API; without it files are made from the numbers alone. */
+  apiBase?: string;
   level?: 2 | 3 | 4;
   /** Small print in the title strip. */
   aside?: ReactNode;
+  /** What stands in the fields at first when that is not the working's own numbers, as typed. */
+  typed?: Typed;
+  /** Where the form goes without JavaScript; without it a working is only read there. */
+  formAction?: string;
+  /** On the button that undoes changes. */
+  putBackLabel?: string;
 }
 
 /** A working as everyone meets it: drawing, inputs, results, cautions, method, template. Complete without JavaScript. */
@@ -55,12 +65,15 @@ function Panel({
   mode,
   units,
   onInputsChange,
-  templateBase,
+  apiBase,
   level,
   aside,
+  typed,
+  formAction,
+  putBackLabel = "Put back the builder's numbers",
   definition,
 }: WorkingPanelProps & { definition: CalculatorDefinition }) {
-  const sum = useWorkingSum(definition, working, units, onInputsChange);
+  const sum = useWorkingSum(definition, working, units, onInputsChange, typed);
   const drawing = drawings[definition.id];
   const shown = { inputs: sum.shown.inputs, results: sum.shown.results, units };
   const beside =
@@ -74,15 +87,13 @@ function Panel({
       number={working.number === null ? null : <NumberTag>{`W${working.number}`}</NumberTag>}
       aside={aside ?? definition.name}
       actions={
-        definition.template ? (
-          <TemplateLinks
-            base={templateBase}
-            definition={definition}
-            {...shown}
-            changed={sum.changed || mode === "edit"}
-            stale={stale}
-          />
-        ) : null
+        <FileLinks
+          base={apiBase}
+          definition={definition}
+          {...shown}
+          changed={sum.changed || mode === "edit"}
+          stale={stale}
+        />
       }
     >
       {/* With the room for it, the numbers stand beside the drawing that they move. */}
@@ -98,6 +109,7 @@ function Panel({
           </div>
           <form
             className="flex flex-col gap-3"
+            {...(formAction && { method: "get", action: formAction })}
             aria-label={`Inputs of ${working.title || definition.name}`}
             onSubmit={(event) => event.preventDefault()}
           >
@@ -109,12 +121,18 @@ function Panel({
               onChange={sum.change}
             />
             {stale ? <StaleNotice issue={sum.issue} placed={Object.keys(sum.typed)} /> : null}
-            {mode === "read" && sum.changed ? (
-              <Button onClick={sum.putBack}>Put back the builder's numbers</Button>
+            {mode === "read" && sum.changed ? <Button onClick={sum.putBack}>{putBackLabel}</Button> : null}
+            {formAction && units === "inch" ? <input type="hidden" name="units" value="inch" /> : null}
+            {formAction && !live ? (
+              <Button type="submit" tone="primary">
+                Work it out
+              </Button>
             ) : null}
           </form>
         </div>
       </div>
+      <OtherVersion definition={definition} working={working} units={units} />
+      {live ? <HeldNumbers definition={definition} drawing={drawing?.flat} {...shown} /> : null}
       {drawing?.solid && live ? <SolidView solid={drawing.solid} {...shown} /> : null}
       <div className="-space-y-px">
         <Disclosure summary="All results" className="shown-on-paper">

@@ -1,6 +1,7 @@
 import { XMLParser, XMLValidator } from "fast-xml-parser";
 import { describe, expect, it } from "vitest";
 import type { Person } from "#server/http/viewer.ts";
+import { calculatorIds } from "#shared/calculators/registry.ts";
 import {
   photoBlock,
   publish,
@@ -231,6 +232,8 @@ describe("GET /sitemap.xml", () => {
     const addresses = urlset.url.map((each: { loc: string }) => each.loc.slice(site.length)).sort();
     expect(addresses).toEqual([
       "/",
+      "/bench",
+      ...calculatorIds.map((id) => `/bench/${id}`).toSorted(),
       "/builds",
       "/builds/heron",
       "/builds/heron/entries/setting-out-the-frame",

@@ -78,9 +78,9 @@ describe("stepped", () => {
 
 describe("templateAddresses", () => {
   it("carries the inputs that are on the screen", () => {
-    const [a4, , svg] = templateAddresses("/api/workings/x/template", { angle: 45 });
+    const [a4, , svg] = templateAddresses("/api/workings/x", { angle: 45 });
     expect(a4?.href).toBe("/api/workings/x/template/pdf?paper=a4&angle=45");
     expect(svg?.href).toBe("/api/workings/x/template/svg?angle=45");
-    expect(templateAddresses("/t", {})[3]?.href).toBe("/t/dxf");
+    expect(templateAddresses("/t", {})[3]?.href).toBe("/t/template/dxf");
   });
 });

@@ -16,7 +16,7 @@ function render(inputs: Record<string, unknown>, units: "mm" | "inch" = "mm", ch
     ...changes,
   };
   return renderToStaticMarkup(
-    <WorkingPanel working={working} mode="read" units={units} templateBase="/api/workings/w/template" />,
+    <WorkingPanel working={working} mode="read" units={units} apiBase="/api/workings/w" />,
   );
 }
 
@@ -70,6 +70,18 @@ describe("WorkingPanel, drawn on the server", () => {
     expect(html).not.toMatch(/NaN|Infinity|undefined/);
     const svgs = [...html.matchAll(/<svg[^>]*role="img".*?<\/svg>/gs)].map(([svg]) => svg);
     for (const svg of svgs) expect(() => new XMLParser().parse(svg, true)).not.toThrow();
+  });
+
+  it("shows both answers when an earlier version of the sum gave another", () => {
+    const run = runCalculator("saddle-cope", inputs);
+    const results = run.ok ? { ...run.value.results, deepest: 20 } : {};
+    const words = wordsOf(render(inputs, "mm", { version: 0, results }));
+    expect(words).toContain("worked by version 0 of the sum. Version 1 gives another answer.");
+    expect(words).toContain("Deepest cut, mm 20.0 29.3 +9.3");
+  });
+
+  it("says nothing of versions while the answers agree", () => {
+    expect(wordsOf(render(inputs, "mm", { version: 0 }))).not.toContain("another answer");
   });
 
   it("says so when the calculator is no longer here", () => {

@@ -1,0 +1,130 @@
+import { DataTable } from "#src/components/data-table.tsx";
+import { Disclosure } from "#src/components/disclosure.tsx";
+
+interface Schema {
+  type?: string | string[];
+  title?: string;
+  description?: string;
+  enum?: unknown[];
+  minimum?: number;
+  maximum?: number;
+  maxLength?: number;
+  items?: Schema;
+  properties?: Record<string, Schema>;
+  required?: string[];
+  anyOf?: Schema[];
+}
+
+type Content = { content?: { "application/json"?: { schema: Schema; example?: unknown } } };
+
+/** One operation of the OpenAPI document, as far as it is shown. */
+export interface Operation {
+  summary: string;
+  description: string;
+  tags?: string[];
+  parameters?: { name: string; in: string; required: boolean; schema: Schema }[];
+  requestBody?: Content;
+  responses: Record<string, Content>;
+}
+
+interface ApiOperationProps {
+  path: string;
+  method: string;
+  operation: Operation;
+}
+
+/** What an address takes and gives, folded until it is wanted. */
+export function ApiOperation({ path, method, operation }: ApiOperationProps) {
+  const { summary, description, parameters = [], requestBody, responses } = operation;
+  const taken = requestBody?.content?.["application/json"];
+  const given = Object.entries(responses).find(([status]) => status.startsWith("2"))?.[1];
+  return (
+    <Disclosure
+      summary={
+        <span className="flex min-w-0 flex-wrap items-baseline gap-x-3">
+          <code className="figures text-xs break-all">
+            {method.toUpperCase()} {path}
+          </code>
+          <span className="text-xs font-normal text-ink-soft">{summary}</span>
+        </span>
+      }
+    >
+      <div className="flex flex-col gap-4 text-sm">
+        <p>{description}</p>
+        {parameters.length > 0 ? (
+          <SchemaTable
+            caption="In the address"
+            rows={parameters.map(({ name, required, schema }) => ({ name, required, schema }))}
+          />
+        ) : null}
+        {taken ? <SchemaTable caption="Takes" rows={rowsOf(taken.schema)} /> : null}
+        {taken?.example ? (
+          <pre className="text-xs break-words whitespace-pre-wrap">
+            {JSON.stringify(taken.example, null, 2)}
+          </pre>
+        ) : null}
+        <SchemaTable caption="Gives" rows={rowsOf(given?.content?.["application/json"]?.schema)} />
+      </div>
+    </Disclosure>
+  );
+}
+
+interface Row {
+  name: string;
+  required: boolean;
+  schema: Schema;
+}
+
+function rowsOf(schema: Schema | undefined, within = "", depth = 0): Row[] {
+  const { properties = {}, required = [] } = schema ?? {};
+  return Object.entries(properties).flatMap(([key, each]): Row[] => {
+    const name = within + key;
+    const inner =
+      depth < 2
+        ? [...rowsOf(each, `${name}.`, depth + 1), ...rowsOf(each.items, `${name}[].`, depth + 1)]
+        : [];
+    return [{ name, required: required.includes(key), schema: each }, ...inner];
+  });
+}
+
+function SchemaTable({ caption, rows }: { caption: string; rows: Row[] }) {
+  if (rows.length === 0) return null;
+  return (
+    <DataTable
+      caption={caption}
+      rowKey={({ name }) => name}
+      rows={rows}
+      columns={[
+        {
+          key: "name",
+          head: "Name",
+          rowHead: true,
+          cell: ({ name }) => <code className="text-xs">{name}</code>,
+        },
+        {
+          key: "kind",
+          head: "Kind",
+          cell: ({ schema, required }) => `${kindOf(schema)}${required ? "" : ", optional"}`,
+        },
+        { key: "meaning", head: "Meaning", cell: ({ schema }) => meaningOf(schema) },
+      ]}
+    />
+  );
+}
+
+function kindOf({ type, enum: values, anyOf, items }: Schema): string {
+  if (values) return values.map(String).join(" | ");
+  if (anyOf) return [...new Set(anyOf.map(kindOf))].join(" or ");
+  if (type === "array") return items?.type ? `list of ${kindOf(items)}` : "list";
+  return [type ?? "anything"].flat().join(" or ");
+}
+
+function meaningOf({ title, description, minimum, maximum, maxLength }: Schema): string {
+  const limits = [
+    minimum !== undefined && minimum > Number.MIN_SAFE_INTEGER && `at least ${minimum}`,
+    maximum !== undefined && maximum < Number.MAX_SAFE_INTEGER && `at most ${maximum}`,
+    maxLength !== undefined && `at most ${maxLength} characters`,
+  ].filter(Boolean);
+  const words = [title && `${title}.`, description, limits.length > 0 && `${limits.join(", ")}.`];
+  return words.filter(Boolean).join(" ");
+}

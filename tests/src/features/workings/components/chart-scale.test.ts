@@ -1,0 +1,2 @@
+import { fc } from "@fast-check/vitest";
+import { describe, expect, it } from "vitest";
