@@ -1,5 +1,14 @@
 import { type ComponentType, lazy } from "react";
+import { BoltDrawing } from "./components/bolt-drawing.tsx";
 import { CopeDrawing } from "./components/cope-drawing.tsx";
+import { FilletWeldDrawing } from "./components/fillet-weld-drawing.tsx";
+import { MitreDrawing } from "./components/mitre-drawing.tsx";
+import { SheetBendDrawing } from "./components/sheet-bend-drawing.tsx";
+import { StrutCurveDrawing } from "./components/strut-curve-drawing.tsx";
+import { StrutDrawing } from "./components/strut-drawing.tsx";
+import { TapDrillDrawing } from "./components/tap-drill-drawing.tsx";
+import { TubePieceDrawing } from "./components/tube-piece-drawing.tsx";
+import { TubeSectionDrawing } from "./components/tube-section-drawing.tsx";
 import type { DrawingProps } from "./drawing-props.ts";
 
 interface Drawing {
@@ -22,4 +31,13 @@ export const drawings: Readonly<Record<string, Drawing>> = {
     CopeDrawing,
     lazy(async () => ({ default: (await import("./components/joint-view-3d.tsx")).JointView3d })),
   ),
+  mitre: drawing(MitreDrawing),
+  "tube-piece": drawing(TubePieceDrawing),
+  bolt: drawing(BoltDrawing),
+  "fillet-weld": drawing(FilletWeldDrawing),
+  "sheet-bend": drawing(SheetBendDrawing),
+  "strut-curve": drawing(StrutCurveDrawing),
+  strut: drawing(StrutDrawing),
+  "tap-drill": drawing(TapDrillDrawing),
+  "tube-section": drawing(TubeSectionDrawing),
 };

@@ -1,6 +1,6 @@
 import { describe, expect, it } from "vitest";
 import { findCalculator } from "#shared/calculators/registry.ts";
-import { drawn, drawingMarkup } from "./drawn.ts";
+import { drawingMarkup, drawn } from "./drawn.ts";
 
 const saddle = (angle: number, more: object = {}) => ({ kind: "saddle", headerOd: 44.5, angle, ...more });
 const piece = { branchOd: 38.1, branchWall: 2.5 };
@@ -14,8 +14,22 @@ const settings: Record<string, object[]> = {
   "tube-piece": [
     { ...piece, between: 120, ends: [saddle(90), saddle(90)] },
     { ...piece, between: 700, ends: [saddle(15), saddle(30, { offset: 3 })], clock: 180 },
-    { ...piece, between: 300, ends: [{ kind: "mitre", turn: 120 }, { kind: "square", setback: 10 }], clock: -200 },
-    { branchOd: 500, branchWall: 10, between: 20_000, ends: [{ kind: "square" }, { kind: "square" }], clock: 360 },
+    {
+      ...piece,
+      between: 300,
+      ends: [
+        { kind: "mitre", turn: 120 },
+        { kind: "square", setback: 10 },
+      ],
+      clock: -200,
+    },
+    {
+      branchOd: 500,
+      branchWall: 10,
+      between: 20_000,
+      ends: [{ kind: "square" }, { kind: "square" }],
+      clock: 360,
+    },
   ],
   "tube-section": [
     { shape: "round", od: 2000, wall: 20 },
@@ -46,7 +60,11 @@ const settings: Record<string, object[]> = {
   "sheet-bend": [
     { ...sheet, flanges: [20, 30, 60, 30, 20], angles: [90, -90, -90, 90] },
     { ...sheet, flanges: [10_000, 12], angles: [-1] },
-    { ...sheet, flanges: Array(20).fill(20), angles: Array.from({ length: 19 }, (_, n) => (n % 4 < 2 ? 90 : -90)) },
+    {
+      ...sheet,
+      flanges: Array(20).fill(20),
+      angles: Array.from({ length: 19 }, (_, n) => (n % 4 < 2 ? 90 : -90)),
+    },
   ],
 };
 
@@ -105,7 +123,17 @@ describe("drawings", () => {
 
   it.each([
     ["mitre", ["deepest 44.5", "90°", "45°", "heel", "toe"]],
-    ["tube-piece", ["tip to tip 577.0", "shortest 551.8", "rough cut 602.0", "hard end: cut it first", "clock 90°", "B's heel"]],
+    [
+      "tube-piece",
+      [
+        "tip to tip 577.0",
+        "shortest 551.8",
+        "rough cut 602.0",
+        "hard end: cut it first",
+        "clock 90°",
+        "B's heel",
+      ],
+    ],
     ["tube-section", ["wall 3.0", "R 6.0 / 3.0", "50.0"]],
     ["strut", ["effective", "Euler", "squash"]],
     ["strut-curve", ["curve c: χ 0.540", "a0", "d"]],
@@ -121,7 +149,9 @@ describe("drawings", () => {
   });
 
   it("draws the same tube section to the scale of its sides", () => {
-    const [section] = drawn(drawingMarkup("tube-section", { shape: "rectangle", width: 100, height: 50, wall: 4 }));
+    const [section] = drawn(
+      drawingMarkup("tube-section", { shape: "rectangle", width: 100, height: 50, wall: 4 }),
+    );
     const outline = section?.places.slice(0, 60) ?? [];
     const xs = outline.map(([x]) => x);
     const ys = outline.map(([, y]) => y);

@@ -36,7 +36,9 @@ export function drawn(markup: string): Drawn[] {
     const attributes = root?.[":@"] ?? {};
     const [, , width = 0, height = 0] = (attributes["@_viewBox"] ?? "").split(" ").map(Number);
     // On a phone the wide drawings have larger letters: those are the ones that must fit.
-    const size = Number(attributes["@_font-size"] ?? /text-\[(\d+)px\]/.exec(attributes["@_class"] ?? "")?.[1]);
+    const size = Number(
+      attributes["@_font-size"] ?? /text-\[(\d+)px\]/.exec(attributes["@_class"] ?? "")?.[1],
+    );
     const sheet: Drawn = { width, height, title: "", description: "", words: [], places: [] };
     for (const child of (root?.svg ?? []) as Node[]) read(child, sheet, size);
     return sheet;
