@@ -1,6 +1,8 @@
 import { defineCalculator } from "../definition.ts";
 import { mitre as compute } from "./formula.ts";
+import { mitreMarks } from "./hand-marks.ts";
 import { mitreInputs } from "./inputs.ts";
+import { mitreTemplate } from "./template.ts";
 
 /** Two equal tubes that meet in a plane cut. */
 export const mitre = defineCalculator({
@@ -13,6 +15,8 @@ export const mitre = defineCalculator({
   inputs: mitreInputs,
   example: { od: 44.5, wall: 2.5, turn: 90 },
   compute,
+  template: mitreTemplate,
+  steps: mitreMarks,
   resultFields: [
     {
       name: "cutAngle",

@@ -1,6 +1,8 @@
 import { defineCalculator } from "../definition.ts";
 import { tubePiece as compute } from "./formula.ts";
+import { pieceMarks } from "./hand-marks.ts";
 import { tubePieceInputs } from "./inputs.ts";
+import { pieceTemplate } from "./template.ts";
 
 /** One round tube between two joints, both ends worked together. */
 export const tubePiece = defineCalculator({
@@ -32,6 +34,8 @@ export const tubePiece = defineCalculator({
     clock: 90,
   },
   compute,
+  template: pieceTemplate,
+  steps: pieceMarks,
   resultFields: [
     {
       name: "tipToTip",

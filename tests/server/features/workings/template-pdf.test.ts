@@ -5,7 +5,7 @@ import { join } from "node:path";
 import sharp from "sharp";
 import { afterAll, beforeAll, describe, expect, it } from "vitest";
 import { templatePdf } from "#server/features/workings/template-pdf.ts";
-import { runCalculator, templateOf } from "#shared/calculators/registry.ts";
+import { findCalculator, runCalculator, templateOf } from "#shared/calculators/registry.ts";
 import type { SaddleCopeResults } from "#shared/calculators/saddle-cope/formula.ts";
 import { type Paper, pageMargin, type Tiling, tileSheet } from "#shared/templates/tiling.ts";
 
@@ -34,8 +34,13 @@ interface Printed {
   file: string;
 }
 
-async function print(inputs: object, paper: Paper, name: string): Promise<Printed> {
-  const run = runCalculator("saddle-cope", inputs);
+async function print(
+  inputs: object,
+  paper: Paper,
+  name: string,
+  calculator = "saddle-cope",
+): Promise<Printed> {
+  const run = runCalculator(calculator, inputs);
   if (!run.ok) throw new Error(run.issue.message);
   const sheet = templateOf(run.value, names);
   const tiling = sheet && tileSheet(sheet.bounds, paper);
@@ -97,26 +102,35 @@ function barEnds(page: Raster, below: number): number[] {
   return darkRuns(page.width, (x) => page.dark(x, row)).filter((at) => at < pageMargin + 103);
 }
 
+function expectBars(page: Raster, tiling: Tiling): void {
+  const bar = tiling.page.height - pageMargin - 43 + 6 + 12;
+  const metric = barEnds(page, bar + 0.8);
+  const inches = barEnds(page, bar + 8.8);
+  expect(metric).toHaveLength(2);
+  expect(inches).toHaveLength(2);
+  expect(Math.abs((metric[1] ?? 0) - (metric[0] ?? 0) - 100)).toBeLessThan(0.2);
+  expect(Math.abs((inches[1] ?? 0) - (inches[0] ?? 0) - 101.6)).toBeLessThan(0.2);
+}
+
 describe("templatePdf", () => {
   it.each([
     ["a4", 210, 297],
     ["letter", 215.9, 279.4],
   ] as const)("prints both check bars on %s true to 0.2 mm", async (paper, width, height) => {
-    const { file, tiling } = await print(
-      { headerOd: 44.5, branchOd: 38.1, branchWall: 2.5, angle: 60 },
-      paper,
-      paper,
-    );
+    const inputs = { headerOd: 44.5, branchOd: 38.1, branchWall: 2.5, angle: 60 };
+    const { file, tiling } = await print(inputs, paper, paper);
     const page = await rasterise(file, 1);
     expect(page.width / perMillimetre).toBeCloseTo(width, 0);
     expect(page.height / perMillimetre).toBeCloseTo(height, 0);
-    const bar = tiling.page.height - pageMargin - 43 + 6 + 12;
-    const metric = barEnds(page, bar + 0.8);
-    const inches = barEnds(page, bar + 8.8);
-    expect(metric).toHaveLength(2);
-    expect(inches).toHaveLength(2);
-    expect(Math.abs((metric[1] ?? 0) - (metric[0] ?? 0) - 100)).toBeLessThan(0.2);
-    expect(Math.abs((inches[1] ?? 0) - (inches[0] ?? 0) - 101.6)).toBeLessThan(0.2);
+    expectBars(page, tiling);
+  });
+
+  it.each([
+    ["mitre", { od: 44.5, wall: 2.5, turn: 90 }],
+    ["tube-piece", findCalculator("tube-piece")?.example ?? {}],
+  ])("prints both check bars of %s true to 0.2 mm, on each of its pages", async (calculator, inputs) => {
+    const { file, tiling } = await print(inputs, "a4", calculator, calculator);
+    for (const tile of tiling.tiles) expectBars(await rasterise(file, tile.page), tiling);
   });
 
   it("tells the viewer not to scale, and embeds every font it uses", async () => {
