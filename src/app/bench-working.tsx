@@ -14,7 +14,7 @@ const rest = 500;
 
 /** A calculator on the bench, with the numbers of the link that led here; the address follows what is worked. */
 export function BenchWorking({ definition }: { definition: CalculatorDefinition }) {
-  const { search } = useLocation();
+  const { search, key: visit } = useLocation();
   const ownUnits = useUnits();
   const start = useMemo(() => startOf(definition, search), [definition, search]);
   const [inputs, setInputs] = useState<Record<string, unknown> | null>(null);
@@ -30,10 +30,12 @@ export function BenchWorking({ definition }: { definition: CalculatorDefinition 
   const { fault } = start;
   return (
     <WorkingPanel
-      key={search}
+      // Each visit starts anew, even when the router saw no change: the address is rewritten past it.
+      key={visit}
       working={start.working}
       mode="read"
       level={2}
+      aside=""
       units={fault?.units ?? ownUnits}
       {...(fault && { typed: fault.typed })}
       formAction={paths.calculator(definition.id)}

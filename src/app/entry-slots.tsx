@@ -6,6 +6,7 @@ import { PhotoBlock, PhotoGroupBlock } from "#src/features/reading/components/ph
 import { useEntryMedia, workingAnchor } from "#src/features/reading/entry-media.ts";
 import { Island } from "#src/lib/island.tsx";
 import { useUnits } from "#src/lib/page-settings.ts";
+import { paths } from "#src/lib/paths.ts";
 import { workingPanel } from "./working-islands.ts";
 
 /** A working as readers get it: the calculator itself, with the builder's numbers in it. */
@@ -32,7 +33,7 @@ function WorkingBlock({ workingId }: WorkingAttributes) {
             working: { ...working, number: null },
             mode: "read",
             units,
-            apiBase: `/api/workings/${working.id}`,
+            apiBase: paths.workingApi(working.id),
           }}
         />
       </div>

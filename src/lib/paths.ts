@@ -11,8 +11,8 @@ export const paths = {
   entry: (build: string, entry: string) => `/builds/${build}/entries/${entry}`,
   bench: () => "/bench",
   calculator: (id: string, query = "") => `/bench/${id}${query && `?${query}`}`,
-  /** Where a kept working's templates are, without the format. */
-  workingTemplate: (workingId: string) => `/api/workings/${workingId}/template`,
+  /** A kept working in the API: its template and its numbers as files are below it. */
+  workingApi: (workingId: string) => `/api/workings/${workingId}`,
   api: () => "/api",
   apiDescription: () => "/api/openapi.json",
   person: (handle: string) => `/people/${handle}`,

@@ -1,7 +1,13 @@
 import { AxeBuilder } from "@axe-core/playwright";
-import { expect, test } from "@playwright/test";
+import { expect, type Page, test } from "@playwright/test";
 
 const sum = "headerOd=44.5&branchOd=38.1&branchWall=2.5&angle=60";
+
+/** Opens the page and waits until it has come alive: what only works then is there. */
+async function openAlive(page: Page, path: string): Promise<void> {
+  await page.goto(path);
+  await expect(page.getByRole("button", { name: "Hold these numbers to compare" })).toBeVisible();
+}
 
 test.describe("the bench", () => {
   test("finds a calculator by a workshop word and opens it", async ({ page }) => {
@@ -26,7 +32,7 @@ test.describe("the bench", () => {
     page,
     context,
   }) => {
-    await page.goto(`/bench/saddle-cope?${sum}`);
+    await openAlive(page, `/bench/saddle-cope?${sum}`);
     const angle = page.getByRole("textbox", { name: "Angle between the axes" });
     await expect(angle).toHaveValue("60");
     await angle.fill("90/2");
@@ -43,7 +49,7 @@ test.describe("the bench", () => {
   });
 
   test("tells the limit beside the box and keeps the last good numbers", async ({ page }) => {
-    await page.goto(`/bench/saddle-cope?${sum}`);
+    await openAlive(page, `/bench/saddle-cope?${sum}`);
     const angle = page.getByRole("textbox", { name: "Angle between the axes" });
     await expect(angle).toHaveValue("60");
     await angle.fill("95");
@@ -52,10 +58,25 @@ test.describe("the bench", () => {
     await expect(angle).toHaveValue("95");
     await page.getByRole("button", { name: "Put back the first numbers" }).click();
     await expect(angle).toHaveValue("60");
+    await angle.fill("50");
+    await expect(page).toHaveURL(/angle=50/);
+    await page.getByRole("link", { name: "Start from the example" }).click();
+    await expect(page).toHaveURL(/saddle-cope$/);
+    await expect(angle).toHaveValue("60");
+  });
+
+  test("holds numbers and shows what differs from them, with the change", async ({ page }) => {
+    await openAlive(page, `/bench/saddle-cope?${sum}`);
+    await page.getByRole("button", { name: "Hold these numbers to compare" }).click();
+    await page.getByRole("textbox", { name: "Angle between the axes" }).fill("75");
+    const comparison = page.getByRole("region", { name: "Comparison" });
+    await expect(comparison.getByRole("row", { name: "Angle between the axes, ° 60 75 +15" })).toBeVisible();
+    await expect(comparison.getByRole("row", { name: /^Deepest cut, mm 25\.2/ })).toBeVisible();
+    await expect(comparison.getByRole("row", { name: /^Branch outside diameter/ })).toHaveCount(0);
   });
 
   test("takes one more item in a list", async ({ page }) => {
-    await page.goto("/bench/sheet-bend");
+    await openAlive(page, "/bench/sheet-bend");
     const flanges = page.getByRole("group", { name: "Flanges" });
     const before = await flanges.getByRole("textbox").count();
     await flanges.getByRole("button", { name: "Add flange" }).click();

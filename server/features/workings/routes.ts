@@ -1,4 +1,6 @@
+import { rateLimit } from "express-rate-limit";
 import { type Route, route } from "#server/http/endpoints.ts";
+import { AppError } from "#server/http/errors.ts";
 import { calculators } from "#shared/calculators/registry.ts";
 import { listCalculators, workSum } from "#shared/contracts/calculators.ts";
 import type { WorkingService } from "./service.ts";
@@ -9,6 +11,19 @@ export function workingRoutes(workings: WorkingService): Route[] {
     route(listCalculators, () => ({
       items: calculators.map(({ words, ...rest }) => ({ ...rest, words: [...words] })),
     })),
-    route(workSum, ({ params, body }) => ({ ...workings.work(params.calculator, body).results })),
+    route(workSum, ({ params, body }) => ({ ...workings.work(params.calculator, body).results }), sumLimit()),
   ];
+}
+
+/** A person at the bench works in the browser; what comes here is programs, and they can wait. */
+function sumLimit() {
+  return rateLimit({
+    windowMs: 60_000,
+    limit: 120,
+    standardHeaders: "draft-8",
+    legacyHeaders: false,
+    handler: () => {
+      throw new AppError("rate_limited", "That is a lot of sums at once. Wait a minute and try again.");
+    },
+  });
 }

@@ -73,6 +73,9 @@ export function useWorkingSum(
     issue: state.issue,
     changed: Object.keys({ ...first, ...state.typed }).some((name) => first[name] !== state.typed[name]),
     change,
-    putBack: () => setState(fresh()),
+    putBack: () => {
+      setState(fresh());
+      onInputsChange?.(kept.inputs);
+    },
   };
 }

@@ -1,4 +1,3 @@
-import { DataTable } from "#src/components/data-table.tsx";
 import { Disclosure } from "#src/components/disclosure.tsx";
 
 interface Schema {
@@ -52,18 +51,18 @@ export function ApiOperation({ path, method, operation }: ApiOperationProps) {
       <div className="flex flex-col gap-4 text-sm">
         <p>{description}</p>
         {parameters.length > 0 ? (
-          <SchemaTable
+          <SchemaList
             caption="In the address"
             rows={parameters.map(({ name, required, schema }) => ({ name, required, schema }))}
           />
         ) : null}
-        {taken ? <SchemaTable caption="Takes" rows={rowsOf(taken.schema)} /> : null}
+        {taken ? <SchemaList caption="Takes" rows={rowsOf(taken.schema)} /> : null}
         {taken?.example ? (
           <pre className="text-xs break-words whitespace-pre-wrap">
             {JSON.stringify(taken.example, null, 2)}
           </pre>
         ) : null}
-        <SchemaTable caption="Gives" rows={rowsOf(given?.content?.["application/json"]?.schema)} />
+        <SchemaList caption="Gives" rows={rowsOf(given?.content?.["application/json"]?.schema)} />
       </div>
     </Disclosure>
   );
@@ -87,28 +86,27 @@ function rowsOf(schema: Schema | undefined, within = "", depth = 0): Row[] {
   });
 }
 
-function SchemaTable({ caption, rows }: { caption: string; rows: Row[] }) {
+/** A list and not a table: on a phone the long names would push the meaning off the screen. */
+function SchemaList({ caption, rows }: { caption: string; rows: Row[] }) {
   if (rows.length === 0) return null;
   return (
-    <DataTable
-      caption={caption}
-      rowKey={({ name }) => name}
-      rows={rows}
-      columns={[
-        {
-          key: "name",
-          head: "Name",
-          rowHead: true,
-          cell: ({ name }) => <code className="text-xs">{name}</code>,
-        },
-        {
-          key: "kind",
-          head: "Kind",
-          cell: ({ schema, required }) => `${kindOf(schema)}${required ? "" : ", optional"}`,
-        },
-        { key: "meaning", head: "Meaning", cell: ({ schema }) => meaningOf(schema) },
-      ]}
-    />
+    <div>
+      <h3 className="mb-1 text-sm font-semibold">{caption}</h3>
+      <dl>
+        {rows.map(({ name, required, schema }) => (
+          <div
+            key={name}
+            className="grid gap-x-4 border-t border-hairline py-1.5 text-xs md:grid-cols-[minmax(0,2fr)_minmax(0,3fr)]"
+          >
+            <dt className="figures break-all">{name}</dt>
+            <dd className="min-w-0 break-words">
+              <span className="text-ink-soft">{`${kindOf(schema)}${required ? "" : ", optional"}. `}</span>
+              {meaningOf(schema)}
+            </dd>
+          </div>
+        ))}
+      </dl>
+    </div>
   );
 }
 

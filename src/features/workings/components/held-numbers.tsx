@@ -28,7 +28,10 @@ export function HeldNumbers({ definition, drawing: Drawing, inputs, results, uni
     ...resultDifferences(definition.resultFields, held.results, results, units),
   ];
   return (
-    <section aria-label="Comparison" className="flex flex-col gap-3 border-y border-hairline py-3">
+    <section
+      aria-label="Comparison"
+      className="flex min-w-0 basis-full flex-col gap-3 border-y border-hairline py-3"
+    >
       {rows.length > 0 ? (
         <>
           {Drawing ? (

@@ -1,3 +1,4 @@
+import { clsx } from "clsx";
 import { Component, type ComponentType, type ReactNode, Suspense, useState } from "react";
 import { Button } from "#src/components/button.tsx";
 import type { DrawingProps } from "../drawing-props.ts";
@@ -25,7 +26,7 @@ export function SolidView({
 }: DrawingProps & { solid: ComponentType<DrawingProps> }) {
   const [open, setOpen] = useState(false);
   return (
-    <div className="no-print -mt-2">
+    <div className={clsx("no-print", open && "basis-full")}>
       <Button aria-expanded={open} onClick={() => setOpen(!open)}>
         {open ? "Close the 3D view" : "Turn the joint round in 3D"}
       </Button>

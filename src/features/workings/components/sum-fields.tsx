@@ -167,14 +167,21 @@ function ListField({
   const { typed, units, onChange } = props;
   const count = countOf(typed, path);
   const one = field.item.label.toLowerCase();
+  const small = field.item.kind === "number";
   return (
     <FieldSet label={field.label} path={path} issue={props.issue}>
       <input type="hidden" name={path} value={count} />
-      <ol className="grid grid-cols-[repeat(auto-fill,minmax(min(13rem,100%),1fr))] gap-x-6">
+      <ol
+        className={
+          small
+            ? "grid grid-cols-[repeat(auto-fill,minmax(min(13rem,100%),1fr))] gap-x-6"
+            : "grid grid-cols-[minmax(0,1fr)]"
+        }
+      >
         {Array.from({ length: count }, (_, index) => (
           // Items have no identity of their own: they are what stands at that place.
           // biome-ignore lint/suspicious/noArrayIndexKey: the place is the identity
-          <li key={index} className="flex items-start gap-2">
+          <li key={index} className={small ? "flex items-start gap-2" : "relative"}>
             <div className="min-w-0 flex-1">
               <PlacedField
                 {...props}
@@ -185,7 +192,7 @@ function ListField({
             </div>
             <Button
               tone="quiet"
-              className="mt-5"
+              className={small ? "mt-5" : "absolute top-0 right-0"}
               aria-label={`Take out ${one} ${index + 1}`}
               onClick={() => onChange(withoutItem(typed, path, index))}
             >

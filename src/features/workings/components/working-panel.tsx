@@ -97,7 +97,7 @@ function Panel({
       }
     >
       {/* With the room for it, the numbers stand beside the drawing that they move. */}
-      <div className={clsx("grid gap-4", beside && "@3xl:grid-cols-[minmax(0,1fr)_18.5rem]")}>
+      <div className={clsx("grid gap-4", beside && "@3xl:grid-cols-[minmax(0,1fr)_16rem]")}>
         <div
           className={clsx("-mx-3 -mt-3 min-w-0 transition-opacity sm:-mx-4 sm:-mt-4", stale && "opacity-45")}
         >
@@ -132,8 +132,12 @@ function Panel({
         </div>
       </div>
       <OtherVersion definition={definition} working={working} units={units} />
-      {live ? <HeldNumbers definition={definition} drawing={drawing?.flat} {...shown} /> : null}
-      {drawing?.solid && live ? <SolidView solid={drawing.solid} {...shown} /> : null}
+      {live ? (
+        <div className="flex flex-wrap gap-2">
+          {drawing?.solid ? <SolidView solid={drawing.solid} {...shown} /> : null}
+          <HeldNumbers definition={definition} drawing={drawing?.flat} {...shown} />
+        </div>
+      ) : null}
       <div className="-space-y-px">
         <Disclosure summary="All results" className="shown-on-paper">
           <div className={clsx("transition-opacity", stale && "opacity-45")}>

@@ -86,6 +86,16 @@ describe("POST /api/calculators/:calculator", () => {
     });
   });
 
+  it("slows down a program that sends sums without end", async () => {
+    const { post } = await shop();
+    const statuses: number[] = [];
+    for (let count = 0; count < 121; count += 1) {
+      statuses.push((await post("/api/calculators/saddle-cope", {})).status);
+    }
+    expect(statuses.slice(0, 120)).toEqual(Array(120).fill(422));
+    expect(statuses[120]).toBe(429);
+  });
+
   it("answers 404 for a calculator there is not", async () => {
     const { post } = await shop();
     expect((await post("/api/calculators/none", {})).status).toBe(404);
