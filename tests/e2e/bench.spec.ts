@@ -9,10 +9,17 @@ async function openAlive(page: Page, path: string): Promise<void> {
   await expect(page.getByRole("button", { name: "Hold these numbers to compare" })).toBeVisible();
 }
 
+/** The button is for those without JavaScript: it goes once the list answers to each key. */
+async function benchIsAlive(page: Page): Promise<void> {
+  await expect(page.getByLabel("What are you doing?")).toBeVisible();
+  await expect(page.getByRole("button", { name: "Find" })).toHaveCount(0);
+}
+
 test.describe("the bench", () => {
   test("finds a calculator by a workshop word and opens it", async ({ page }) => {
     await page.goto("/");
     await page.getByRole("navigation", { name: "Site" }).getByRole("link", { name: "Bench" }).click();
+    await benchIsAlive(page);
     await page.getByLabel("What are you doing?").fill("fishmouth");
     const list = page.getByRole("region", { name: "Joining tubes" });
     await expect(list.getByRole("link")).toHaveCount(1);
@@ -22,6 +29,7 @@ test.describe("the bench", () => {
 
   test("says so when no calculator answers to a word, and shows all again", async ({ page }) => {
     await page.goto("/bench");
+    await benchIsAlive(page);
     await page.getByLabel("What are you doing?").fill("marmalade");
     await expect(page.getByText("Nothing here for “marmalade”")).toBeVisible();
     await page.getByRole("link", { name: "Show all" }).click();

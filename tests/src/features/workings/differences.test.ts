@@ -4,8 +4,9 @@ import { inputDifferences, resultDifferences } from "#src/features/workings/diff
 
 function sum(id: string, changes: Record<string, unknown> = {}) {
   const definition = findCalculator(id);
-  const run = definition && runCalculator(id, { ...definition.example, ...changes });
-  if (!run?.ok) throw new Error(`${id} does not work`);
+  if (!definition) throw new Error(`there is no ${id}`);
+  const run = runCalculator(id, { ...definition.example, ...changes });
+  if (!run.ok) throw new Error(`${id} does not work`);
   return { definition, numbers: run.value };
 }
 
