@@ -23,6 +23,8 @@ const between = 12;
 /** Where one end's wrap lies: its squared end, its other edge, and the y of a depth, in mm. */
 interface Wrap {
   name: "A" | "B";
+  /** A square end is alike all round. */
+  hasHeel: boolean;
   squared: number;
   edge: number;
   at(depth: number): number;
@@ -80,6 +82,7 @@ function wrapsOf(inputs: TubePieceInputs, { ends }: TubePieceResults): Wrap[] {
   return [
     {
       name: "A",
+      hasHeel: endA?.kind !== "square",
       squared: 0,
       edge: edgeA,
       at: (depth) => depth,
@@ -87,6 +90,7 @@ function wrapsOf(inputs: TubePieceInputs, { ends }: TubePieceResults): Wrap[] {
     },
     {
       name: "B",
+      hasHeel: endB?.kind !== "square",
       squared: tipB,
       edge: edgeB,
       at: (depth) => tipB - depth,
@@ -109,7 +113,7 @@ function wrapLines(wrap: Wrap, inputs: TubePieceInputs, { strip }: TubePieceResu
     upright("datum", 0),
     upright("datum", width),
     ...[1, 2, 3].map((quarter) => upright("guide", (width * quarter) / 4, clear)),
-    ...(wrap.name === "B" && heelB > 0 ? [upright("datum", heelB, clear)] : []),
+    ...(wrap.name === "B" && wrap.hasHeel && heelB > 0 ? [upright("datum", heelB, clear)] : []),
     straight("guide", [0, wrap.squared], [width, wrap.squared]),
     straight("edge", [0, wrap.edge], [width, wrap.edge]),
     ...wrapArrow([width / 2 + 3, namesTop(wrap) - 2]),
@@ -143,12 +147,16 @@ function wrapLabels(
   const heelAnchor = heel > width * 0.8 ? "end" : "start";
   return [
     ...quarters,
-    {
-      at: [heelAnchor === "start" ? heel + 1.2 : heel - 1.2, top + size * 2.5 + 0.6],
-      text: `${wrap.name} HEEL`,
-      size,
-      anchor: heelAnchor,
-    },
+    ...(wrap.hasHeel
+      ? [
+          {
+            at: [heel + (heelAnchor === "start" ? 1.2 : -1.2), top + size * 2.5 + 0.6],
+            text: `${wrap.name} HEEL`,
+            size,
+            anchor: heelAnchor,
+          } as const,
+        ]
+      : []),
     ...fittedLabel([1.2, low], names.build, 3, room),
     ...fittedLabel([1.2, low + 4], names.working, 3, room),
     ...fittedLabel(

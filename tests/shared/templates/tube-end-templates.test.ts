@@ -24,7 +24,7 @@ type Places = readonly (readonly [number, number])[];
 
 /** The y of a drawn curve at a place along the sheet, straight between its points. */
 function yAt(points: Places, x: number): number {
-  const after = points.findIndex((point) => point[0] >= x - 1e-9);
+  const after = points.findIndex((point) => point[0] >= x - 1e-3);
   const [x2, y2] = points[after] ?? [Number.NaN, Number.NaN];
   const [x1, y1] = points[Math.max(0, after - 1)] ?? [x2, y2];
   return x2 === x1 ? y2 : y1 + ((y2 - y1) * (x - x1)) / (x2 - x1);

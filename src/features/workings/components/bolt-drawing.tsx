@@ -3,7 +3,7 @@ import type { BoltResults } from "#shared/calculators/bolt/formula.ts";
 import type { BoltInputs } from "#shared/calculators/bolt/inputs.ts";
 import { lengthFigure } from "#shared/units/length.ts";
 import type { DrawingProps } from "../drawing-props.ts";
-import { Figure, linePath, type Spot } from "./drawing-parts.tsx";
+import { Figure, linePath, type Spot, stroke } from "./drawing-parts.tsx";
 import { arcSpots, DrawingPair, DrawingSheet, grouped, Hatched } from "./drawing-sheet.tsx";
 
 const size = { width: 360, height: 330 };
@@ -53,34 +53,13 @@ function BoltInJoint({ inputs, results, show }: BoltInJointProps) {
       title="The bolt in its joint"
       description={`${inputs.size} by ${results.pitch}, grade ${inputs.grade}. Stress area ${results.stressArea.toFixed(1)} square millimetres. ${inputs.threadsInShear ? "The thread" : "The plain shank"} lies in the shear plane.`}
     >
-      <path
-        className="line-centre"
-        d={linePath([
-          [left - 14, y],
-          [end + 14, y],
-        ])}
-      />
+      <path className="line-centre" d={stroke(left - 14, y, end + 14, y)} />
       <path className="line-outline" d={linePath(bolt)} />
       <path
         className="line-dimension"
-        d={
-          linePath([
-            [thread, y - root],
-            [end, y - root],
-          ]) +
-          linePath([
-            [thread, y + root],
-            [end, y + root],
-          ])
-        }
+        d={stroke(thread, y - root, end, y - root) + stroke(thread, y + root, end, y + root)}
       />
-      <path
-        className="line-outline"
-        d={linePath([
-          [thread, y - d / 2],
-          [thread, y + d / 2],
-        ])}
-      />
+      <path className="line-outline" d={stroke(thread, y - d / 2, thread, y + d / 2)} />
       <path className="line-outline" d={hexagon(left, head, y) + hexagon(nut, 0.85 * d, y)} />
       <path className="line-outline" d={plate(start, plane, y) + plate(plane, nut, y)} />
       <ShearPlane x={plane} y={y} />
@@ -102,23 +81,8 @@ function BoltInJoint({ inputs, results, show }: BoltInJointProps) {
 /** Side view across corners: three faces. */
 function hexagon(x: number, thick: number, y: number): string {
   const half = 0.92 * d;
-  const rows = [-half, -half / 2, half / 2, half].map((up) =>
-    linePath([
-      [x, y + up],
-      [x + thick, y + up],
-    ]),
-  );
-  return (
-    rows.join("") +
-    [x, x + thick]
-      .map((at) =>
-        linePath([
-          [at, y - half],
-          [at, y + half],
-        ]),
-      )
-      .join("")
-  );
+  const rows = [-half, -half / 2, half / 2, half].map((up) => stroke(x, y + up, x + thick, y + up));
+  return rows.join("") + [x, x + thick].map((at) => stroke(at, y - half, at, y + half)).join("");
 }
 
 /** A clamped plate above and below the bolt. */
@@ -140,10 +104,7 @@ function plate(from: number, to: number, y: number): string {
 function ShearPlane({ x, y }: { x: number; y: number }) {
   const arrow = (at: number, from: number, to: number) => {
     const way = Math.sign(to - from);
-    return `${linePath([
-      [at, from],
-      [at, to],
-    ])}${linePath([
+    return `${stroke(at, from, at, to)}${linePath([
       [at - 4, to - way * 8],
       [at, to],
       [at + 4, to - way * 8],
@@ -151,13 +112,7 @@ function ShearPlane({ x, y }: { x: number; y: number }) {
   };
   return (
     <g stroke="var(--color-straw)" fill="none" strokeWidth="2">
-      <path
-        d={linePath([
-          [x, y - 76],
-          [x, y + 76],
-        ])}
-        strokeDasharray="7 4"
-      />
+      <path d={stroke(x, y - 76, x, y + 76)} strokeDasharray="7 4" />
       <path d={arrow(x - 12, y + 66, y + 40) + arrow(x + 12, y - 66, y - 40)} />
     </g>
   );
@@ -173,13 +128,7 @@ function StressArea({ results, show }: { results: BoltResults; show: (length: nu
     <>
       <path className="line-dimension" d={linePath(arcSpots(centre, outside, 0, 360))} />
       <Hatched id={id} d={`${linePath(arcSpots(centre, (outside * across) / results.diameter, 0, 360))}Z`} />
-      <path
-        className="line-dimension"
-        d={linePath([
-          [centre[0] + 20, 268],
-          [116, 268],
-        ])}
-      />
+      <path className="line-dimension" d={stroke(centre[0] + 20, 268, 116, 268)} />
       <Figure at={[120, 273]}>{`stress area ${results.stressArea.toFixed(1)} mm²`}</Figure>
       <Figure at={[120, 295]} soft>
         {`as a circle ⌀ ${show(across)}`}
@@ -223,13 +172,7 @@ function BoltLoads({ inputs, results }: { inputs: BoltInputs; results: BoltResul
           </g>
         );
       })}
-      <path
-        className="line-dimension"
-        d={linePath([
-          [8, 24],
-          [8, 250],
-        ])}
-      />
+      <path className="line-dimension" d={stroke(8, 24, 8, 250)} />
       <Figure at={[8, 292]}>{`Tighten to ${results.torque.toFixed(1)} N·m`}</Figure>
       <Figure at={[8, 314]} soft>
         {`K ${inputs.frictionFactor}: a third more or less`}

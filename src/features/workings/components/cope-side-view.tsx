@@ -6,6 +6,7 @@ import {
 } from "#shared/calculators/saddle-cope/formula.ts";
 import type { SaddleCopeInputs } from "#shared/calculators/saddle-cope/inputs.ts";
 import { Dimension, Figure, linePath, type Spot } from "./drawing-parts.tsx";
+import { breakLine } from "./drawing-sheet.tsx";
 
 const view = { width: 400, height: 330 };
 const border = 46;
@@ -163,15 +164,6 @@ function edgePath({ tube, at }: Plan, seen: boolean): string {
     }
   }
   return run.length > 1 ? path + linePath(run) : path;
-}
-
-/** A tube that goes on: one lazy S between its two sides. */
-function breakLine([x1, y1]: Spot, [x2, y2]: Spot): string {
-  const bow = 0.09;
-  const [dx, dy] = [(y2 - y1) * bow, (x1 - x2) * bow];
-  const point = (share: number, side: number) =>
-    `${(x1 + (x2 - x1) * share + dx * side).toFixed(2)} ${(y1 + (y2 - y1) * share + dy * side).toFixed(2)}`;
-  return `M${point(0, 0)}C${point(0.25, 1)} ${point(0.4, 1)} ${point(0.5, 0)}S${point(0.75, -1)} ${point(1, 0)}`;
 }
 
 /** Below this angle the branch lies over the place above the heel, and its figure goes below the header. */

@@ -5,6 +5,14 @@ export function linePath(spots: readonly Spot[]): string {
   return spots.map(([x, y], index) => `${index === 0 ? "M" : "L"}${x.toFixed(2)} ${y.toFixed(2)}`).join("");
 }
 
+/** One straight line. */
+export function stroke(x1: number, y1: number, x2: number, y2: number): string {
+  return linePath([
+    [x1, y1],
+    [x2, y2],
+  ]);
+}
+
 function along([x1, y1]: Spot, [x2, y2]: Spot) {
   const length = Math.hypot(x2 - x1, y2 - y1) || 1;
   return { length, ux: (x2 - x1) / length, uy: (y2 - y1) / length };

@@ -3,7 +3,7 @@ import type { FilletWeldResults } from "#shared/calculators/fillet-weld/formula.
 import type { FilletWeldInputs } from "#shared/calculators/fillet-weld/inputs.ts";
 import { lengthFigure } from "#shared/units/length.ts";
 import type { DrawingProps } from "../drawing-props.ts";
-import { Dimension, Figure, linePath, type Spot } from "./drawing-parts.tsx";
+import { Dimension, Figure, linePath, type Spot, stroke } from "./drawing-parts.tsx";
 import { arcSpots, breakLine, DrawingPair, DrawingSheet, grouped, Hatched } from "./drawing-sheet.tsx";
 
 const size = { width: 360, height: 310 };
@@ -43,26 +43,11 @@ function AcrossWeld({ results, show }: WeldProps) {
       <path
         className="line-outline"
         d={
-          linePath([
-            [x - plate, 26],
-            [x - plate, y],
-          ]) +
-          linePath([
-            [x, y - leg],
-            [x, 26],
-          ]) +
-          linePath([
-            [20, y],
-            [x, y],
-          ]) +
-          linePath([
-            [x + leg, y],
-            [320, y],
-          ]) +
-          linePath([
-            [20, y + plate],
-            [320, y + plate],
-          ]) +
+          stroke(x - plate, 26, x - plate, y) +
+          stroke(x, y - leg, x, 26) +
+          stroke(20, y, x, y) +
+          stroke(x + leg, y, 320, y) +
+          stroke(20, y + plate, 320, y + plate) +
           breakLine([20, y], [20, y + plate]) +
           breakLine([320, y], [320, y + plate]) +
           breakLine([x - plate, 26], [x, 26])
@@ -73,18 +58,9 @@ function AcrossWeld({ results, show }: WeldProps) {
       <path
         className="line-dimension"
         d={
-          linePath([
-            [x, y + 4],
-            [x, low + 6],
-          ]) +
-          linePath([
-            [x + leg, y + 4],
-            [x + leg, low + 6],
-          ]) +
-          linePath([
-            [x + 6, y - leg],
-            [right + 6, y - leg],
-          ]) +
+          stroke(x, y + 4, x, low + 6) +
+          stroke(x + leg, y + 4, x + leg, low + 6) +
+          stroke(x + 6, y - leg, right + 6, y - leg) +
           linePath([face, [x + 128, 66], [350, 66]])
         }
       />
@@ -137,24 +113,9 @@ function AlongWeld({ inputs, results, show }: WeldProps) {
       />
       <path
         className="line-outline"
-        d={
-          linePath([
-            [from, y + 13],
-            [from - 26, y + 13],
-          ]) +
-          linePath([
-            [to, y + 13],
-            [to + 26, y + 13],
-          ])
-        }
+        d={stroke(from, y + 13, from - 26, y + 13) + stroke(to, y + 13, to + 26, y + 13)}
       />
-      <path
-        className="line-centre"
-        d={linePath([
-          [from - 20, y],
-          [to + 20, y],
-        ])}
-      />
+      <path className="line-centre" d={stroke(from - 20, y, to + 20, y)} />
       <path
         className="line-outline"
         stroke="var(--color-straw)"
@@ -172,16 +133,7 @@ function AlongWeld({ inputs, results, show }: WeldProps) {
       </Figure>
       <path
         className="line-dimension"
-        d={
-          linePath([
-            [from, y + 17],
-            [from, y + 50],
-          ]) +
-          linePath([
-            [to, y + 17],
-            [to, y + 50],
-          ])
-        }
+        d={stroke(from, y + 17, from, y + 50) + stroke(to, y + 17, to, y + 50)}
       />
       <Dimension from={[from, y + 44]} to={[to, y + 44]} text={show(inputs.length)} at={[180, y + 64]} />
       <Figure at={[180, 272]} anchor="middle">{`${grouped(results.resistance / 1000, 1)} kN`}</Figure>

@@ -1,6 +1,6 @@
 import type { MitreResults } from "#shared/calculators/mitre/formula.ts";
 import type { MitreInputs } from "#shared/calculators/mitre/inputs.ts";
-import { Dimension, Figure, linePath, type Spot } from "./drawing-parts.tsx";
+import { Dimension, Figure, linePath, type Spot, stroke } from "./drawing-parts.tsx";
 import { arcSpots, breakLine, DrawingSheet, fitted } from "./drawing-sheet.tsx";
 
 const size = { width: 400, height: 340 };
@@ -18,12 +18,7 @@ export function MitreSideView({ inputs, results, show }: SideViewProps) {
   const [heel, toe] = [at(-slant, r), at(slant, -r)];
   const low = at(0, -r)[1] + 30;
   const square =
-    plan.turn > 12
-      ? linePath([heel, [heel[0], low + 6]])
-      : linePath([
-          [heel[0], at(0, -r)[1]],
-          [heel[0], low + 6],
-        ]);
+    plan.turn > 12 ? linePath([heel, [heel[0], low + 6]]) : stroke(heel[0], at(0, -r)[1], heel[0], low + 6);
   const wallOff = r - inputs.wall;
   return (
     <DrawingSheet
@@ -55,13 +50,7 @@ export function MitreSideView({ inputs, results, show }: SideViewProps) {
         }
       />
       <path className="line-dimension" strokeDasharray="3 3" d={square} />
-      <path
-        className="line-dimension"
-        d={linePath([
-          [toe[0], toe[1] + 4],
-          [toe[0], low + 6],
-        ])}
-      />
+      <path className="line-dimension" d={stroke(toe[0], toe[1] + 4, toe[0], low + 6)} />
       <Dimension
         from={[heel[0], low]}
         to={[toe[0], low]}

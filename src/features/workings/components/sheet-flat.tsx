@@ -1,6 +1,6 @@
 import type { SheetBendResults } from "#shared/calculators/sheet-bend/formula.ts";
 import type { SheetBendInputs } from "#shared/calculators/sheet-bend/inputs.ts";
-import { Dimension, Figure, linePath, type Spot } from "./drawing-parts.tsx";
+import { Dimension, Figure, linePath, type Spot, stroke } from "./drawing-parts.tsx";
 import { DrawingSheet } from "./drawing-sheet.tsx";
 import { staggered } from "./staggered.ts";
 
@@ -20,8 +20,9 @@ export function SheetFlat({ inputs, results, show }: SheetFlatProps) {
   const words = results.bendLines.map(show);
   const rows = staggered(
     results.bendLines.map((line, index) => {
-      const half = ((words[index]?.length ?? 0) * 9) / 2 + 4;
-      const middle = Math.min(width - half, Math.max(half, at(line)));
+      const word = words[index] ?? "";
+      const half = (word.length * 9) / 2 + 4;
+      const middle = kept(at(line), word);
       return { from: middle - half, to: middle + half };
     }),
   );
@@ -47,14 +48,7 @@ export function SheetFlat({ inputs, results, show }: SheetFlatProps) {
       />
       <path
         className="line-dimension"
-        d={[left, left + long]
-          .map((x) =>
-            linePath([
-              [x, top - 4],
-              [x, top - 24],
-            ]),
-          )
-          .join("")}
+        d={[left, left + long].map((x) => stroke(x, top - 4, x, top - 24)).join("")}
       />
       <Dimension
         from={[left, top - 18]}
@@ -62,47 +56,45 @@ export function SheetFlat({ inputs, results, show }: SheetFlatProps) {
         text={`flat ${show(results.flatLength)}`}
         at={[width / 2, top - 27]}
       />
-      {results.bendLines.map((line, index) => {
-        const half = (results.bends[index]?.allowance ?? 0) / 2;
-        const x = at(line);
-        const word = words[index] ?? "";
-        const room = (word.length * 9) / 2 + 4;
-        const y = low + 26 + (rows[index] ?? 0) * 22;
-        return (
-          <g key={line}>
-            <path
-              className="line-dimension"
-              strokeDasharray="3 3"
-              d={
-                linePath([
-                  [at(line - half), top],
-                  [at(line - half), low],
-                ]) +
-                linePath([
-                  [at(line + half), top],
-                  [at(line + half), low],
-                ])
-              }
-            />
-            <path
-              className="line-centre"
-              d={linePath([
-                [x, top - 8],
-                [x, y - 14],
-              ])}
-            />
-            <Figure at={[Math.min(width - room, Math.max(room, x)), y]} anchor="middle">
-              {word}
-            </Figure>
-          </g>
-        );
-      })}
+      {results.bendLines.map((line, index) => (
+        <BendLine
+          key={line}
+          x={at(line)}
+          half={at((results.bends[index]?.allowance ?? 0) / 2) - left}
+          y={low + 26 + (rows[index] ?? 0) * 22}
+          word={words[index] ?? ""}
+        />
+      ))}
       <Figure at={[width / 2, height - 8]} anchor="middle" soft>
         Bend lines from the left edge
       </Figure>
       {results.bendLines.length <= 4 ? <Ways inputs={inputs} results={results} at={at} /> : null}
     </DrawingSheet>
   );
+}
+
+/** One bend line with the sheet that goes into its bend, and its distance from the edge. */
+function BendLine({ x, half, y, word }: { x: number; half: number; y: number; word: string }) {
+  const low = top + tall;
+  return (
+    <>
+      <path
+        className="line-dimension"
+        strokeDasharray="3 3"
+        d={stroke(x - half, top, x - half, low) + stroke(x + half, top, x + half, low)}
+      />
+      <path className="line-centre" d={stroke(x, top - 8, x, y - 14)} />
+      <Figure at={[kept(x, word), y]} anchor="middle">
+        {word}
+      </Figure>
+    </>
+  );
+}
+
+/** The middle of a word, moved in from the sheet's ends. */
+function kept(x: number, word: string): number {
+  const room = (word.length * 9) / 2 + 4;
+  return Math.min(width - room, Math.max(room, x));
 }
 
 /** How far each bend turns, and which way, between the bend line and the next. */

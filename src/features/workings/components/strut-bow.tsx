@@ -1,7 +1,7 @@
 import type { StrutResults } from "#shared/calculators/strut/formula.ts";
 import type { StrutInputs } from "#shared/calculators/strut/inputs.ts";
 import { stepsBetween } from "./chart-scale.ts";
-import { Dimension, Figure, linePath, type Spot } from "./drawing-parts.tsx";
+import { Dimension, Figure, linePath, type Spot, stroke } from "./drawing-parts.tsx";
 import { DrawingSheet } from "./drawing-sheet.tsx";
 
 const size = { width: 360, height: 330 };
@@ -42,13 +42,7 @@ export function StrutBow({ inputs, results, show }: StrutBowProps) {
       title="The strut and how it would bow"
       description={`Length ${show(inputs.length)}, effective length ${show(results.effectiveLength)}. ${bent ? "The bow is drawn larger than it is." : "It is too short to bow and is squashed."}`}
     >
-      <path
-        className="line-centre"
-        d={linePath([
-          [middle, top - 16],
-          [middle, foot + 16],
-        ])}
-      />
+      <path className="line-centre" d={stroke(middle, top - 16, middle, foot + 16)} />
       {factor > 1 && bent ? <path className="line-hidden" d={side(0, foot, top + tall)} /> : null}
       <path className="line-outline" d={side(-half) + side(half)} />
       <End x={across(top)} y={top} way={-1} />
@@ -80,13 +74,7 @@ function End({ x, y, way }: { x: number; y: number; way: 1 | -1 }) {
   const tip = y + way * 3;
   return (
     <>
-      <path
-        className="line-outline"
-        d={linePath([
-          [x, y + way * 26],
-          [x, tip + way * 8],
-        ])}
-      />
+      <path className="line-outline" d={stroke(x, y + way * 26, x, tip + way * 8)} />
       <path
         className="fill-chalk"
         d={`${linePath([
@@ -95,13 +83,7 @@ function End({ x, y, way }: { x: number; y: number; way: 1 | -1 }) {
           [x + 5, tip + way * 11],
         ])}Z`}
       />
-      <path
-        className="line-outline"
-        d={linePath([
-          [x - 22, y],
-          [x + 22, y],
-        ])}
-      />
+      <path className="line-outline" d={stroke(x - 22, y, x + 22, y)} />
     </>
   );
 }
@@ -118,11 +100,7 @@ interface UprightProps {
 /** An upright dimension with its name over the figure, on the outer side of its line. */
 function Upright({ x, from, to, name, text, anchor }: UprightProps) {
   const out = anchor === "start" ? 1 : -1;
-  const witness = (y: number) =>
-    linePath([
-      [middle + out * 30, y],
-      [x + out * 6, y],
-    ]);
+  const witness = (y: number) => stroke(middle + out * 30, y, x + out * 6, y);
   const centre = (from + to) / 2;
   return (
     <>

@@ -3,7 +3,7 @@ import type { TapDrillResults } from "#shared/calculators/tap-drill/formula.ts";
 import type { TapDrillInputs } from "#shared/calculators/tap-drill/inputs.ts";
 import { lengthFigure } from "#shared/units/length.ts";
 import type { DrawingProps } from "../drawing-props.ts";
-import { Dimension, Figure, linePath, type Spot } from "./drawing-parts.tsx";
+import { Dimension, Figure, linePath, type Spot, stroke } from "./drawing-parts.tsx";
 import { arcSpots, DrawingPair, DrawingSheet, Hatched } from "./drawing-sheet.tsx";
 
 const size = { width: 360, height: 330 };
@@ -43,32 +43,12 @@ function TappedHole({ results, show }: HoleProps) {
       description={`${results.designation}: drilled ${show(standardDrill)}, outside diameter of the thread ${show(diameter)}, pitch ${show(pitch)}; ${results.standardDrillEngagement.toFixed(0)} percent of a full thread.`}
     >
       <Hatched id={id} d={side(-1) + side(1)} />
-      <path
-        className="line-centre"
-        d={linePath([
-          [middle, top - 14],
-          [middle, bottom + 62],
-        ])}
-      />
+      <path className="line-centre" d={stroke(middle, top - 14, middle, bottom + 14)} />
       <path
         className="line-dimension"
         d={
-          [-drilled, drilled]
-            .map((x) =>
-              linePath([
-                [middle + x, top],
-                [middle + x, top - 24],
-              ]),
-            )
-            .join("") +
-          [-out, out]
-            .map((x) =>
-              linePath([
-                [middle + x, bottom],
-                [middle + x, bottom + 34],
-              ]),
-            )
-            .join("")
+          [-drilled, drilled].map((x) => stroke(middle + x, top, middle + x, top - 24)).join("") +
+          [-out, out].map((x) => stroke(middle + x, bottom, middle + x, bottom + 34)).join("")
         }
       />
       <Dimension
@@ -127,16 +107,7 @@ function Holes({ results, show }: HoleProps) {
     >
       <path
         className="line-centre"
-        d={
-          linePath([
-            [2, centre[1]],
-            [234, centre[1]],
-          ]) +
-          linePath([
-            [centre[0], 54],
-            [centre[0], 290],
-          ])
-        }
+        d={stroke(2, centre[1], 234, centre[1]) + stroke(centre[0], 54, centre[0], 290)}
       />
       {sorted.map(([name, across], index) => {
         const radius = across * scale;

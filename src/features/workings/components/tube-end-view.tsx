@@ -1,6 +1,6 @@
 import type { TubePieceResults } from "#shared/calculators/tube-piece/formula.ts";
 import type { TubePieceInputs } from "#shared/calculators/tube-piece/inputs.ts";
-import { Figure, linePath, type Spot } from "./drawing-parts.tsx";
+import { Figure, linePath, type Spot, stroke } from "./drawing-parts.tsx";
 import { arcSpots, DrawingSheet } from "./drawing-sheet.tsx";
 
 const size = { width: 300, height: 330 };
@@ -36,16 +36,7 @@ export function TubeEndView({ inputs, show }: TubeEndViewProps) {
       />
       <path
         className="line-centre"
-        d={
-          linePath([
-            [x - radius - 14, y],
-            [x + radius + 14, y],
-          ]) +
-          linePath([
-            [x, y - 6],
-            [x, y + radius + 14],
-          ])
-        }
+        d={stroke(x - radius - 14, y, x + radius + 14, y) + stroke(x, y - 6, x, y + radius + 14)}
       />
       <path className="line-outline" d={linePath([centre, on(radius + 10, 0)])} />
       <path className="line-hidden" d={linePath([centre, on(radius + 10, clock)])} />

@@ -3,7 +3,7 @@ import type { TubeSectionResults } from "#shared/calculators/tube-section/formul
 import type { TubeSectionInputs } from "#shared/calculators/tube-section/inputs.ts";
 import { lengthFigure } from "#shared/units/length.ts";
 import type { DrawingProps } from "../drawing-props.ts";
-import { Dimension, Figure, linePath, type Spot } from "./drawing-parts.tsx";
+import { Dimension, Figure, linePath, type Spot, stroke } from "./drawing-parts.tsx";
 import { arcSpots, DrawingPair, DrawingSheet, grouped, Hatched } from "./drawing-sheet.tsx";
 
 const size = { width: 360, height: 340 };
@@ -44,9 +44,6 @@ function Section({ inputs, results, show }: SectionProps) {
   const bore = round
     ? ring(halfWidth - wall)
     : box(halfWidth - wall, halfHeight - wall, results.insideRadius * scale);
-  const low = y + halfHeight + 34;
-  const right = x + halfWidth + 34;
-  const sizeWord = round ? `⌀ ${show(width)}` : show(width);
   return (
     <DrawingSheet
       {...size}
@@ -57,14 +54,8 @@ function Section({ inputs, results, show }: SectionProps) {
       <path
         className="line-centre"
         d={
-          linePath([
-            [x - halfWidth - 20, y],
-            [x + halfWidth + 20, y],
-          ]) +
-          linePath([
-            [x, y - halfHeight - 20],
-            [x, y + halfHeight + 14],
-          ])
+          stroke(x - halfWidth - 20, y, x + halfWidth + 20, y) +
+          stroke(x, y - halfHeight - 20, x, y + halfHeight + 14)
         }
       />
       <Figure at={[x - halfWidth - 26, y + 5]} anchor="end" soft>
@@ -73,39 +64,17 @@ function Section({ inputs, results, show }: SectionProps) {
       <Figure at={[x, y - halfHeight - 26]} anchor="middle" soft>
         {isTall(inputs) ? "2" : "1"}
       </Figure>
-      <path
-        className="line-dimension"
-        d={[-halfWidth, halfWidth]
-          .map((out) =>
-            linePath([
-              [x + out, y + (round ? 0 : halfHeight - results.outsideRadius * scale) + 4],
-              [x + out, low + 6],
-            ]),
-          )
-          .join("")}
+      <Sides
+        half={[halfWidth, halfHeight]}
+        straight={round ? 0 : halfHeight - results.outsideRadius * scale}
+        across={round ? `⌀ ${show(width)}` : show(width)}
       />
-      <Dimension from={[x - halfWidth, low]} to={[x + halfWidth, low]} text={sizeWord} at={[x, low + 20]} />
       {inputs.shape === "rectangle" ? (
-        <>
-          <path
-            className="line-dimension"
-            d={[-halfHeight, halfHeight]
-              .map((up) =>
-                linePath([
-                  [x + halfWidth - results.outsideRadius * scale + 4, y + up],
-                  [right + 6, y + up],
-                ]),
-              )
-              .join("")}
-          />
-          <Dimension
-            from={[right, y - halfHeight]}
-            to={[right, y + halfHeight]}
-            text={show(height)}
-            at={[right + 8, y + 5]}
-            anchor="start"
-          />
-        </>
+        <Heights
+          half={[halfWidth, halfHeight]}
+          straight={halfWidth - results.outsideRadius * scale}
+          text={show(height)}
+        />
       ) : null}
       <Callouts
         {...{ inputs, results, show }}
@@ -113,6 +82,42 @@ function Section({ inputs, results, show }: SectionProps) {
         wall={wall}
       />
     </DrawingSheet>
+  );
+}
+
+interface SidesProps {
+  half: Spot;
+  /** How far the side runs straight from the middle: the witness lines begin there. */
+  straight: number;
+}
+
+function Sides({ half: [halfWidth, halfHeight], straight, across }: SidesProps & { across: string }) {
+  const [x, y] = centre;
+  const low = y + halfHeight + 34;
+  const witness = (out: number) => stroke(x + out, y + straight + 4, x + out, low + 6);
+  return (
+    <>
+      <path className="line-dimension" d={witness(-halfWidth) + witness(halfWidth)} />
+      <Dimension from={[x - halfWidth, low]} to={[x + halfWidth, low]} text={across} at={[x, low + 20]} />
+    </>
+  );
+}
+
+function Heights({ half: [halfWidth, halfHeight], straight, text }: SidesProps & { text: string }) {
+  const [x, y] = centre;
+  const right = x + halfWidth + 34;
+  const witness = (up: number) => stroke(x + straight + 4, y + up, right + 6, y + up);
+  return (
+    <>
+      <path className="line-dimension" d={witness(-halfHeight) + witness(halfHeight)} />
+      <Dimension
+        from={[right, y - halfHeight]}
+        to={[right, y + halfHeight]}
+        text={text}
+        at={[right + 8, y + 5]}
+        anchor="start"
+      />
+    </>
   );
 }
 
@@ -156,14 +161,15 @@ function box(halfWidth: number, halfHeight: number, radius: number): string {
 
 /** The properties, set out by axis. */
 function Worth({ results, upright }: { results: TubeSectionResults; upright: boolean }) {
+  const same = results.i === results.iMinor;
   const rows = [
     ["area", grouped(results.area, 1), "mm²"],
     ["mass", results.massPerMetre.toFixed(3), "kg/m"],
-    [`axis 1–1, ${upright ? "lying" : "upright"}: strong`, "", ""],
+    [same ? "axis 1–1" : `axis 1–1, ${upright ? "lying" : "upright"}: strong`, "", ""],
     ["I", grouped(results.i), "mm⁴"],
     ["W", grouped(results.w), "mm³"],
     ["Wpl", grouped(results.wpl), "mm³"],
-    [`axis 2–2, ${upright ? "upright" : "lying"}`, "", ""],
+    [same ? "axis 2–2: the same" : `axis 2–2, ${upright ? "upright" : "lying"}`, "", ""],
     ["I", grouped(results.iMinor), "mm⁴"],
     ["W", grouped(results.wMinor), "mm³"],
     ["i", results.radiusOfGyrationMinor.toFixed(2), "mm"],
@@ -181,13 +187,7 @@ function Worth({ results, upright }: { results: TubeSectionResults; upright: boo
         return (
           <g key={`${name}${y}`}>
             {figure ? null : (
-              <path
-                className="line-dimension opacity-60"
-                d={linePath([
-                  [8, y - 20],
-                  [352, y - 20],
-                ])}
-              />
+              <path className="line-dimension opacity-60" d={stroke(8, y - 20, 352, y - 20)} />
             )}
             <Figure at={[figure ? 24 : 8, y]} soft={figure !== ""}>
               {name}

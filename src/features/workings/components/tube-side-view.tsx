@@ -1,6 +1,6 @@
 import type { StripPoint, TubePieceResults } from "#shared/calculators/tube-piece/formula.ts";
 import type { TubePieceInputs } from "#shared/calculators/tube-piece/inputs.ts";
-import { Dimension, Figure, linePath, type Spot } from "./drawing-parts.tsx";
+import { Dimension, Figure, linePath, type Spot, stroke } from "./drawing-parts.tsx";
 import { breakLine, DrawingSheet } from "./drawing-sheet.tsx";
 
 const size = { width: 400, height: 330 };
@@ -35,40 +35,18 @@ export function TubeSideView({ inputs, results, show }: TubeSideViewProps) {
         className="line-centre"
         d={
           whole
-            ? linePath([
-                [left - 16, middle],
-                [right + 16, middle],
-              ])
-            : linePath([
-                [left - 16, middle],
-                [plan.breakA, middle],
-              ]) +
-              linePath([
-                [plan.breakB, middle],
-                [right + 16, middle],
-              ])
+            ? stroke(left - 16, middle, right + 16, middle)
+            : stroke(left - 16, middle, plan.breakA, middle) + stroke(plan.breakB, middle, right + 16, middle)
         }
       />
       <Ends plan={plan} curve={results.strip.curve} />
       <path
         className="line-dimension"
         d={
-          linePath([
-            [tipA, middle],
-            [tipA, lengthY - 6],
-          ]) +
-          linePath([
-            [tipB, middle],
-            [tipB, lengthY - 6],
-          ]) +
-          linePath([
-            [fromA(short.a), shortY],
-            [fromA(short.a), shortestY + 6],
-          ]) +
-          linePath([
-            [fromB(short.b), shortY],
-            [fromB(short.b), shortestY + 6],
-          ])
+          stroke(tipA, middle, tipA, lengthY - 6) +
+          stroke(tipB, middle, tipB, lengthY - 6) +
+          stroke(fromA(short.a), shortY, fromA(short.a), shortestY + 6) +
+          stroke(fromB(short.b), shortY, fromB(short.b), shortestY + 6)
         }
         strokeDasharray="3 3"
       />

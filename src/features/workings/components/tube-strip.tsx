@@ -1,6 +1,6 @@
 import type { StripPoint, TubePieceResults } from "#shared/calculators/tube-piece/formula.ts";
 import type { TubePieceInputs } from "#shared/calculators/tube-piece/inputs.ts";
-import { Dimension, linePath, type Spot } from "./drawing-parts.tsx";
+import { Dimension, linePath, type Spot, stroke } from "./drawing-parts.tsx";
 import { breakLine, DrawingSheet } from "./drawing-sheet.tsx";
 
 const width = 640;
@@ -31,15 +31,7 @@ export function TubeStrip({ results, show }: TubeStripProps) {
   const a = (along: number) => top + along * scale;
   const b = (along: number) => bottom - (tipToTip - along) * scale;
   const heelB = left + ((right - left) * strip.heelB) / strip.width;
-  const upright = (x: number) =>
-    linePath([
-      [x, top],
-      [x, breakA],
-    ]) +
-    linePath([
-      [x, breakB],
-      [x, bottom],
-    ]);
+  const upright = (x: number) => stroke(x, top, x, breakA) + stroke(x, breakB, x, bottom);
   const rows = [left, right].map((x) => upright(x)).join("");
   return (
     <DrawingSheet
@@ -58,32 +50,14 @@ export function TubeStrip({ results, show }: TubeStripProps) {
       <path
         className="line-outline opacity-60"
         strokeDasharray="3 3"
-        d={
-          linePath([
-            [left, top],
-            [right, top],
-          ]) +
-          linePath([
-            [left, bottom],
-            [right, bottom],
-          ])
-        }
+        d={stroke(left, top, right, top) + stroke(left, bottom, right, bottom)}
       />
       <path className="line-hidden" d={line((point) => a(point.innerA)) + line((point) => b(point.innerB))} />
       <path className="line-outline" d={line((point) => a(point.a)) + line((point) => b(point.b))} />
       <path
         className="line-dimension"
         style={{ stroke: "var(--color-straw)" }}
-        d={
-          linePath([
-            [left, top - 8],
-            [left, breakA],
-          ]) +
-          linePath([
-            [heelB, breakB],
-            [heelB, bottom + 8],
-          ])
-        }
+        d={stroke(left, top - 8, left, breakA) + stroke(heelB, breakB, heelB, bottom + 8)}
       />
       <text className="drawing-figure" x={left} y={top - 18}>
         A's heel: datum
@@ -110,16 +84,7 @@ function DepthOf({ name, from, to, text }: { name: string; from: number; to: num
     <>
       <path
         className="line-dimension"
-        d={
-          linePath([
-            [right + 4, from],
-            [x + 6, from],
-          ]) +
-          linePath([
-            [right + 4, to],
-            [x + 6, to],
-          ])
-        }
+        d={stroke(right + 4, from, x + 6, from) + stroke(right + 4, to, x + 6, to)}
       />
       <Dimension
         from={[x, from]}

@@ -1,6 +1,6 @@
 import { type LengthUnits, toInches } from "#shared/units/length.ts";
 import { niceTicks } from "./chart-scale.ts";
-import { linePath, type Spot } from "./drawing-parts.tsx";
+import { linePath, type Spot, stroke } from "./drawing-parts.tsx";
 import { DrawingSheet } from "./drawing-sheet.tsx";
 
 const left = 78;
@@ -39,6 +39,8 @@ export function UnrolledCut({ outside, bore, deepest, around, units, show }: Unr
   const line = (depth: (place: number) => number) =>
     linePath(Array.from({ length: 181 }, (_, step) => at(step * 2, depth(step * 2))));
   const words = quarters.slice(0, 4).map(([place, name]) => `${name} ${show(outside(place))}`);
+  // Figures this long would run into each other: those of the sides stand in the description.
+  const crowded = show(outside(0)).length > 5;
   return (
     <DrawingSheet
       width={width}
@@ -59,11 +61,11 @@ export function UnrolledCut({ outside, bore, deepest, around, units, show }: Unr
           </text>
           <text
             className="drawing-figure fill-chalk-soft"
-            x={at(place, 0)[0] - (index === 0 && show(outside(0)).length > 5 ? 34 : 0)}
+            x={at(place, 0)[0]}
             y={top - 14}
             textAnchor={anchorOf(index)}
           >
-            {index === 4 ? "" : show(outside(place))}
+            {index === 4 || (crowded && index % 2 === 1) ? "" : show(outside(place))}
           </text>
         </g>
       ))}
@@ -93,15 +95,9 @@ function DepthLines({ deepest, units, at }: DepthLinesProps) {
         const [x, y] = at(0, (value * deepest) / (whole || 1));
         return (
           <g key={label}>
-            <path
-              className="line-dimension opacity-40"
-              d={linePath([
-                [x, y],
-                [width - right, y],
-              ])}
-            />
+            <path className="line-dimension opacity-40" d={stroke(x, y, width - right, y)} />
             <text className="drawing-figure fill-chalk-soft" x={left - 10} y={y + 6} textAnchor="end">
-              {label}
+              {label.length > 4 ? label.replace(/^0\./, ".") : label}
             </text>
           </g>
         );

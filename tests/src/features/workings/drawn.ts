@@ -30,7 +30,13 @@ export function drawingMarkup(id: string, inputs: object, units: LengthUnits = "
 
 /** Reads the drawings out of the markup. Letters of the mono face are 0.6 em wide. */
 export function drawn(markup: string): Drawn[] {
-  const parser = new XMLParser({ ignoreAttributes: false, preserveOrder: true, trimValues: false });
+  const parser = new XMLParser({
+    ignoreAttributes: false,
+    preserveOrder: true,
+    trimValues: false,
+    parseTagValue: false,
+    htmlEntities: true,
+  });
   return [...markup.matchAll(/<svg[^>]*role="img".*?<\/svg>/gs)].map(([svg]) => {
     const [root] = parser.parse(svg) as Node[];
     const attributes = root?.[":@"] ?? {};
