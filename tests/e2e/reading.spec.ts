@@ -41,7 +41,7 @@ test.describe("without JavaScript", () => {
     const working = page.locator("#w4");
     await expect(working.getByRole("img").first()).toBeVisible();
     await expect(working.getByText("Deepest cut").first()).toBeVisible();
-    await expect(working.getByText("11.6", { exact: true }).first()).toBeVisible();
+    await expect(working.getByText("11.6 mm", { exact: true }).first()).toBeVisible();
     await expect(working.getByText(/does not judge the strength/)).toBeVisible();
     const template = await working.getByRole("link", { name: "PDF, A4" }).getAttribute("href");
     const file = await page.request.get(String(template));
