@@ -64,7 +64,7 @@ export function StrutCurveDrawing({ inputs, results }: DrawingProps<StrutCurveIn
             anchor="end"
           >{`curve ${curve}: χ ${results.chi.toFixed(3)}`}</Figure>
           <Figure at={[size.width - 16, 84]} anchor="end" soft>
-            dashed: perfect strut
+            dashed: perfect
           </Figure>
         </DrawingSheet>
       </div>
