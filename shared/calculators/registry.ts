@@ -10,6 +10,7 @@ import { saddleCope } from "./saddle-cope/definition.ts";
 import { sheetBend } from "./sheet-bend/definition.ts";
 import { springRideCalculator } from "./spring-ride/definition.ts";
 import { steeringAxisCalculator } from "./steering-axis/definition.ts";
+import { stockCuttingCalculator } from "./stock-cutting/definition.ts";
 import { strut } from "./strut/definition.ts";
 import { strutCurve } from "./strut-curve/definition.ts";
 import { tapDrill } from "./tap-drill/definition.ts";
@@ -35,6 +36,7 @@ export const calculators: readonly CalculatorDefinition[] = [
   tubeBendCalculator,
   sheetBend,
   tapDrill,
+  stockCuttingCalculator,
 ];
 
 /** Ids as used in the address, the API and the command line. */
