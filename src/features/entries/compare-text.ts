@@ -39,7 +39,7 @@ function compareLine(gone: string | undefined, fresh: string | undefined): Compa
   });
 }
 
-/** Words with the space after them, so that the runs join up again. */
+/** Words, and the spaces between them on their own, so that a word stays the same whatever follows it. */
 function wordsOf(line: string): string[] {
-  return line.match(/\S+\s*|\s+/g) ?? [];
+  return line.match(/\S+|\s+/g) ?? [];
 }

@@ -61,9 +61,9 @@ describe("compareTexts", () => {
       [{ kind: "same", text: "Same." }],
       [
         { kind: "same", text: "The arm is " },
-        { kind: "gone", text: "42 " },
-        { kind: "new", text: "44 " },
-        { kind: "same", text: "mm long." },
+        { kind: "gone", text: "42" },
+        { kind: "new", text: "44" },
+        { kind: "same", text: " mm long." },
       ],
       [{ kind: "new", text: "New." }],
     ]);
