@@ -59,6 +59,8 @@ async function loseConnection(page: Page): Promise<() => Promise<void>> {
 }
 
 test("an entry is written by keyboard alone, kept, and published", async ({ page, baseURL }) => {
+  // On a freshly loaded demo the demo's own photos are made ready first.
+  test.setTimeout(180_000);
   const id = await beginDraft(page, baseURL);
   await openEditor(page, id);
   await page.getByLabel("Title", { exact: true }).focus();
@@ -93,7 +95,7 @@ test("an entry is written by keyboard alone, kept, and published", async ({ page
   await page.getByLabel("What the photo shows").fill("A tube end coped to sit square on another.");
   await saved(page);
   const joint = page.getByRole("img", { name: "A tube end coped to sit square on another." });
-  await expect(joint).toBeVisible({ timeout: 20_000 });
+  await expect(joint).toBeVisible({ timeout: 120_000 });
   await page.getByRole("button", { name: "Publish", exact: true }).click();
   await expect(page.getByText("The entry is public.")).toBeVisible();
   await page.getByRole("link", { name: "See it as readers do" }).click();
