@@ -12,13 +12,6 @@ export interface WorkedWorking {
   run: CalculatorRun;
 }
 
-/** What an entry says: the part of it that revisions keep. */
-interface EntryContent {
-  title: string;
-  summary: string;
-  document: DocumentJson;
-}
-
 /** A document that passed every check, and what stands in it. */
 export interface CheckedDocument {
   document: DocumentJson;

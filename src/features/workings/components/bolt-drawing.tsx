@@ -150,7 +150,7 @@ function BoltLoads({ inputs, results }: { inputs: BoltInputs; results: BoltResul
   return (
     <DrawingSheet
       {...size}
-      title="What the bolt holds"
+      title="The bolt's resistances and preload"
       description={`${bars.map(([name, load]) => `${name} ${(load / 1000).toFixed(1)} kilonewtons`).join(", ")}. Torque ${results.torque.toFixed(1)} newton metres.`}
     >
       {bars.map(([name, load], index) => {

@@ -100,7 +100,7 @@ function AlongWeld({ inputs, results, show }: WeldProps) {
     <DrawingSheet
       {...size}
       title="The weld from above, with its load"
-      description={`${show(inputs.length)} of weld, load at ${angle} degrees to it. It holds ${grouped(results.resistancePerMm)} newtons a millimetre, ${grouped(results.resistance)} newtons in all.`}
+      description={`${show(inputs.length)} of weld, load at ${angle} degrees to it. Resistance ${grouped(results.resistancePerMm)} newtons a millimetre, ${grouped(results.resistance)} newtons in all.`}
     >
       <Hatched
         id={id}

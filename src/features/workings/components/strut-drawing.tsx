@@ -9,7 +9,7 @@ import { Figure } from "./drawing-parts.tsx";
 import { DrawingPair, DrawingSheet } from "./drawing-sheet.tsx";
 import { StrutBow } from "./strut-bow.tsx";
 
-/** The strut as it would bow, and what it holds at other lengths. */
+/** The strut as it would bow, and its resistance at other lengths. */
 export function StrutDrawing({ inputs, results, units }: DrawingProps<StrutInputs, StrutResults>) {
   const show = (length: number) => lengthFigure(length, units, 0);
   return (
@@ -68,7 +68,7 @@ function StrutChart({
       <Figure
         at={[356, 18]}
         anchor="end"
-      >{`holds ${(resistance / 1000).toFixed(resistance < 10_000 ? 2 : 1)}`}</Figure>
+      >{`resistance ${(resistance / 1000).toFixed(resistance < 10_000 ? 2 : 1)}`}</Figure>
     </DrawingSheet>
   );
 }

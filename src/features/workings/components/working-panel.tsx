@@ -1,6 +1,7 @@
 import { clsx } from "clsx";
 import { type ReactNode, useEffect, useState, useSyncExternalStore } from "react";
 import type { CalculatorDefinition } from "#shared/calculators/definition.ts";
+import type { InputField } from "#shared/calculators/inputs.ts";
 import { findCalculator } from "#shared/calculators/registry.ts";
 import { formatLength, type LengthUnits } from "#shared/units/length.ts";
 import { Button } from "#src/components/button.tsx";
@@ -76,8 +77,7 @@ function Panel({
   const sum = useWorkingSum(definition, working, units, onInputsChange, typed);
   const drawing = drawings[definition.id];
   const shown = { inputs: sum.shown.inputs, results: sum.shown.results, units };
-  const beside =
-    drawing && definition.fields.every((field) => field.kind !== "point" && field.kind !== "list");
+  const beside = drawing !== undefined && fitsBeside(definition.fields);
   const live = useIsLive();
   const stale = sum.issue !== null;
   return (
@@ -154,6 +154,12 @@ function Panel({
       />
     </Plate>
   );
+}
+
+/** More boxes than stand as high as a drawing, or wide ones, go below it. */
+function fitsBeside(fields: readonly InputField[]): boolean {
+  const boxes = fields.filter((field) => field.kind !== "number" || !field.minor);
+  return boxes.length <= 7 && boxes.every(({ kind }) => kind !== "point" && kind !== "list");
 }
 
 function StaleNotice({
