@@ -47,3 +47,17 @@ export function clippedBelow(points: readonly CurvePoint[], top: number): CurveP
   if (run.length > 0) runs.push(run);
   return runs;
 }
+
+/** Round values for an axis that does not begin at 0: every one from `low` to `high`. */
+export function ticksBetween(low: number, high: number, parts = 4): { value: number; label: string }[] {
+  const [zero, first] = niceTicks(high - low, parts);
+  const step = (first?.value ?? 0) - (zero?.value ?? 0);
+  if (!(step > 0)) return [];
+  const decimals = (first?.label.split(".")[1] ?? "").length;
+  const from = Math.ceil(low / step - 1e-9);
+  const count = Math.floor(high / step + 1e-9) - from + 1;
+  return Array.from({ length: Math.max(0, count) }, (_, index) => {
+    const value = (from + index) * step + 0;
+    return { value, label: value.toFixed(decimals).replace("-", "−") };
+  });
+}

@@ -7,6 +7,7 @@ const piece = { branchOd: 38.1, branchWall: 2.5 };
 const tube = { shape: "round", od: 48.3, wall: 3, length: 1500, yield: 235, curve: "c" };
 const weld = { length: 100, ultimate: 470, correlation: 0.9 };
 const sheet = { thickness: 1.5, insideRadius: 2, kFactor: 0.42 };
+const corner = findCalculator("wishbone-travel")?.example ?? {};
 
 /** The example of each calculator, and settings at the ends of what can be asked. */
 const settings: Record<string, object[]> = {
@@ -64,6 +65,25 @@ const settings: Record<string, object[]> = {
       ...sheet,
       flanges: Array(20).fill(20),
       angles: Array.from({ length: 19 }, (_, n) => (n % 4 < 2 ? 90 : -90)),
+    },
+  ],
+  "wishbone-travel": [
+    { ...corner, bump: 0, rebound: 0, tableUp: undefined, spring: undefined },
+    { ...corner, upperFront: [156, 283, 416], upperRear: [-34, 283, 416], tableUp: -300 },
+    { ...corner, upperFront: [156, 283, 300], upperRear: [-34, 283, 300], tableUp: 172, step: 1 },
+    { ...corner, camber: 15, toe: -10, bump: 90, rebound: 70 },
+  ],
+  "stock-cutting": [
+    { pieces: [{ length: 5, count: 100 }], stock: [{ length: 600 }], kerf: 0 },
+    {
+      pieces: [1500, 700, 300, 120, 60.5].map((length) => ({
+        label: "A mark of the forty letters that may be",
+        length,
+        count: 1,
+      })),
+      stock: [{ length: 6000 }],
+      kerf: 20,
+      trim: 300,
     },
   ],
 };
@@ -141,6 +161,8 @@ describe("drawings", () => {
     ["bolt", ["M12 × 1.75, grade 8.8", "stress area 84.3 mm²", "thread in shear", "Tighten to 88.0 N·m"]],
     ["tap-drill", ["drill ⌀ 6.80", "M8 ⌀ 8.00", "close", "medium", "free", "minor"]],
     ["sheet-bend", ["flat 132.1", "40.0", "60.0", "90°", "38.0", "94.0"]],
+    ["wishbone-travel", ["table", "72.0", "168.0", "316.0", "camber, °", "toe, °", "track change, mm"]],
+    ["stock-cutting", ["2 × 1840 Rail", "mm; kerf 2.0; offcut hatched"]],
   ])("writes the numbers of %s's example on its drawing", (id, expected) => {
     const words = drawn(drawingMarkup(id, findCalculator(id)?.example ?? {})).flatMap((each) =>
       each.words.map(({ text }) => text),
