@@ -4,10 +4,12 @@ import { CopeDrawing } from "./components/cope-drawing.tsx";
 import { FilletWeldDrawing } from "./components/fillet-weld-drawing.tsx";
 import { MitreDrawing } from "./components/mitre-drawing.tsx";
 import { SheetBendDrawing } from "./components/sheet-bend-drawing.tsx";
+import { SteeringAxisDrawing } from "./components/steering-axis-drawing.tsx";
 import { StockCuttingDrawing } from "./components/stock-cutting-drawing.tsx";
 import { StrutCurveDrawing } from "./components/strut-curve-drawing.tsx";
 import { StrutDrawing } from "./components/strut-drawing.tsx";
 import { TapDrillDrawing } from "./components/tap-drill-drawing.tsx";
+import { TubeBendDrawing } from "./components/tube-bend-drawing.tsx";
 import { TubePieceDrawing } from "./components/tube-piece-drawing.tsx";
 import { TubeSectionDrawing } from "./components/tube-section-drawing.tsx";
 import { WishboneTravelDrawing } from "./components/wishbone-travel-drawing.tsx";
@@ -44,4 +46,6 @@ export const drawings: Readonly<Record<string, Drawing>> = {
   "tube-section": drawing(TubeSectionDrawing),
   "wishbone-travel": drawing(WishboneTravelDrawing),
   "stock-cutting": drawing(StockCuttingDrawing),
+  "steering-axis": drawing(SteeringAxisDrawing),
+  "tube-bend": drawing(TubeBendDrawing),
 };

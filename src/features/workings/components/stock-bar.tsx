@@ -45,7 +45,7 @@ export function placedBar(
     const to = from - kerf;
     const half = (text.length * 9) / 2 + 4;
     const wanted = barSheet.left + ((start + to) / 2) * scale;
-    const middle = Math.min(barSheet.width - half, Math.max(half, wanted));
+    const middle = Math.min(barSheet.width - half - 4, Math.max(half + 4, wanted));
     return { text, from: start, to, length, count, middle, half };
   });
   const rows = staggered(cuts.map(({ middle, half }) => ({ from: middle - half, to: middle + half })));

@@ -8,6 +8,7 @@ const tube = { shape: "round", od: 48.3, wall: 3, length: 1500, yield: 235, curv
 const weld = { length: 100, ultimate: 470, correlation: 0.9 };
 const sheet = { thickness: 1.5, insideRadius: 2, kFactor: 0.42 };
 const corner = findCalculator("wishbone-travel")?.example ?? {};
+const upright = findCalculator("steering-axis")?.example ?? {};
 
 /** The example of each calculator, and settings at the ends of what can be asked. */
 const settings: Record<string, object[]> = {
@@ -84,6 +85,39 @@ const settings: Record<string, object[]> = {
       stock: [{ length: 6000 }],
       kerf: 20,
       trim: 300,
+    },
+  ],
+  "steering-axis": [
+    { ...upright, turnedOver: true, camber: 15 },
+    { ...upright, lower: { out: -600, up: 0, fore: 600 }, upper: { out: 600, up: 20, fore: -600 } },
+    { ...upright, lower: { out: -25, up: -100, fore: 0 }, upper: { out: -25, up: 100, fore: 0 }, camber: 0 },
+  ],
+  "tube-bend": [
+    {
+      points: [
+        [0, 0, 0],
+        [1000, 0, 0],
+        [1000, 0, 1000],
+      ],
+      bendRadius: 100,
+      od: 30,
+      wall: 2,
+    },
+    {
+      points: [
+        [0, 0, 0],
+        [1000, 1000, -1000],
+        [1000, 3000, -1000],
+      ],
+      bendRadius: 100,
+      od: 30,
+      wall: 2,
+    },
+    {
+      points: Array.from({ length: 40 }, (_, n) => [n * 200, (n % 2) * 200, (n % 3) * 200]),
+      bendRadius: 20,
+      od: 20,
+      wall: 2,
     },
   ],
 };
@@ -163,6 +197,8 @@ describe("drawings", () => {
     ["sheet-bend", ["flat 132.1", "40.0", "60.0", "90°", "38.0", "94.0"]],
     ["wishbone-travel", ["table", "72.0", "168.0", "316.0", "camber, °", "toe, °", "track change, mm"]],
     ["stock-cutting", ["2 × 1840 Rail", "mm; kerf 2.0; offcut hatched"]],
+    ["steering-axis", ["kpi 7.01°", "caster 4.69°", "scrub radius 20.5", "trail 20.1", "spindle 48.8"]],
+    ["tube-bend", ["first end", "1: 42.9°", "2: 47.1°"]],
   ])("writes the numbers of %s's example on its drawing", (id, expected) => {
     const words = drawn(drawingMarkup(id, findCalculator(id)?.example ?? {})).flatMap((each) =>
       each.words.map(({ text }) => text),
