@@ -1,9 +1,11 @@
 import { type ComponentType, lazy } from "react";
 import { BoltDrawing } from "./components/bolt-drawing.tsx";
 import { CopeDrawing } from "./components/cope-drawing.tsx";
+import { CornerWeightsDrawing } from "./components/corner-weights-drawing.tsx";
 import { FilletWeldDrawing } from "./components/fillet-weld-drawing.tsx";
 import { MitreDrawing } from "./components/mitre-drawing.tsx";
 import { SheetBendDrawing } from "./components/sheet-bend-drawing.tsx";
+import { SpringRideDrawing } from "./components/spring-ride-drawing.tsx";
 import { SteeringAxisDrawing } from "./components/steering-axis-drawing.tsx";
 import { StockCuttingDrawing } from "./components/stock-cutting-drawing.tsx";
 import { StrutCurveDrawing } from "./components/strut-curve-drawing.tsx";
@@ -48,4 +50,6 @@ export const drawings: Readonly<Record<string, Drawing>> = {
   "stock-cutting": drawing(StockCuttingDrawing),
   "steering-axis": drawing(SteeringAxisDrawing),
   "tube-bend": drawing(TubeBendDrawing),
+  "corner-weights": drawing(CornerWeightsDrawing),
+  "spring-ride": drawing(SpringRideDrawing),
 };

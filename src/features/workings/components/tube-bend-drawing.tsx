@@ -56,7 +56,7 @@ export function TubeBendDrawing({ inputs, results, units }: DrawingProps<TubeBen
           ))}
           <Figure at={[8, 20]}>{`cut ${lengthFigure(results.cutLength, units, 1)} ${unit}`}</Figure>
           <Figure at={[size.width / 2, size.height - 8]} anchor="middle" soft>
-            isometric: z up, x and y to the back
+            isometric: x right, y left, z up
           </Figure>
         </DrawingSheet>
       </div>

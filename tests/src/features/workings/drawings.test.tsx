@@ -9,6 +9,7 @@ const weld = { length: 100, ultimate: 470, correlation: 0.9 };
 const sheet = { thickness: 1.5, insideRadius: 2, kFactor: 0.42 };
 const corner = findCalculator("wishbone-travel")?.example ?? {};
 const upright = findCalculator("steering-axis")?.example ?? {};
+const scales = findCalculator("corner-weights")?.example ?? {};
 
 /** The example of each calculator, and settings at the ends of what can be asked. */
 const settings: Record<string, object[]> = {
@@ -120,6 +121,17 @@ const settings: Record<string, object[]> = {
       wall: 2,
     },
   ],
+  "corner-weights": [
+    { ...scales, lf: 0, rf: 0, lr: 0, rr: 20_000, lifted: undefined },
+    { ...scales, lf: 20_000, rf: 20_000, lr: 20_000, rr: 20_000, lifted: undefined },
+    { ...scales, wheelbase: 12_000, frontTrack: 1000, rearTrack: 100, lifted: undefined },
+    { ...scales, wheelbase: 200, frontTrack: 4000, rearTrack: 100, lifted: undefined },
+  ],
+  "spring-ride": [
+    { cornerMass: 140, springRate: 0.1, motionRatio: 0.05, tyreRate: 1 },
+    { cornerMass: 1, springRate: 5000, motionRatio: 2, tyreRate: 10_000 },
+    { cornerMass: 140, springRate: 38, motionRatio: 0.59, tyreRate: 180, targetFrequency: 4 },
+  ],
 };
 
 const cases = Object.entries(settings).flatMap(([id, list]) =>
@@ -199,6 +211,8 @@ describe("drawings", () => {
     ["stock-cutting", ["2 × 1840 Rail", "mm; kerf 2.0; offcut hatched"]],
     ["steering-axis", ["kpi 7.01°", "caster 4.69°", "scrub radius 20.5", "trail 20.1", "spindle 48.8"]],
     ["tube-bend", ["first end", "1: 42.9°", "2: 47.1°"]],
+    ["corner-weights", ["118.0", "112.0", "149.0", "141.0", "front 44.2 %", "cross 50.2 %"]],
+    ["spring-ride", ["now 1.49 Hz", "target wants 44.1 N/mm"]],
   ])("writes the numbers of %s's example on its drawing", (id, expected) => {
     const words = drawn(drawingMarkup(id, findCalculator(id)?.example ?? {})).flatMap((each) =>
       each.words.map(({ text }) => text),

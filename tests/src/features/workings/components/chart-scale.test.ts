@@ -1,6 +1,6 @@
 import fc from "fast-check";
 import { describe, expect, it } from "vitest";
-import { clippedBelow, niceTicks } from "#src/features/workings/components/chart-scale.ts";
+import { clippedBelow, niceTicks, ticksBetween } from "#src/features/workings/components/chart-scale.ts";
 
 describe("niceTicks", () => {
   it.each([
@@ -22,6 +22,30 @@ describe("niceTicks", () => {
         expect(ticks.length).toBeLessThanOrEqual(12);
         expect(ticks.at(-1)?.value).toBeLessThanOrEqual(most * (1 + 1e-6));
       }),
+    );
+  });
+});
+
+describe("ticksBetween", () => {
+  it("labels round values on both sides of 0, with a true minus", () => {
+    expect(ticksBetween(-50, 50).map(({ label }) => label)).toEqual(["−50", "0", "50"]);
+    expect(ticksBetween(-0.12, 0.02).map(({ label }) => label)).toEqual(["−0.10", "−0.05", "0.00"]);
+  });
+
+  it("keeps every value within the axis, evenly apart", () => {
+    fc.assert(
+      fc.property(
+        fc.double({ min: -4000, max: 4000, noNaN: true }),
+        fc.double({ min: 0.1, max: 4000, noNaN: true }),
+        (low, range) => {
+          const values = ticksBetween(low, low + range).map(({ value }) => value);
+          expect(values.length).toBeGreaterThan(0);
+          expect(Math.min(...values)).toBeGreaterThanOrEqual(low - range * 1e-6);
+          expect(Math.max(...values)).toBeLessThanOrEqual(low + range * (1 + 1e-6));
+          const gaps = values.slice(1).map((value, index) => value - (values[index] ?? 0));
+          for (const gap of gaps) expect(gap).toBeCloseTo(gaps[0] ?? 0, 6);
+        },
+      ),
     );
   });
 });
