@@ -1,6 +1,6 @@
 import X from "lucide-react/icons/x";
 import { Dialog as Radix } from "radix-ui";
-import type { ReactNode } from "react";
+import { type ReactNode, useRef } from "react";
 
 type DialogProps = {
   title: string;
@@ -14,14 +14,33 @@ type DialogProps = {
   actions?: ReactNode;
 };
 
-/** App pages only (Radix): never import from a public reading page. Comes up from the bottom edge on a phone. */
+/**
+ * App pages only (Radix): never import from a public reading page. Comes up from the bottom edge on a phone. The focus
+ * begins on what carries `data-focus-first`, and goes back to where it was.
+ */
 export function Dialog({ title, description, trigger, open, onOpenChange, children, actions }: DialogProps) {
+  const before = useRef<Element | null>(null);
+  const begin = (event: Event) => {
+    before.current = document.activeElement;
+    const first = (event.target as HTMLElement).querySelector<HTMLElement>("[data-focus-first]");
+    if (!first) return;
+    event.preventDefault();
+    first.focus();
+  };
+  // Radix gives the focus back to its own trigger alone; without one it would be lost.
+  const end = (event: Event) => {
+    if (trigger || !(before.current instanceof HTMLElement)) return;
+    event.preventDefault();
+    before.current.focus();
+  };
   return (
     <Radix.Root {...(open === undefined ? {} : { open })} onOpenChange={onOpenChange}>
       {trigger ? <Radix.Trigger asChild>{trigger}</Radix.Trigger> : null}
       <Radix.Portal>
         <Radix.Overlay className="fixed inset-0 z-40 bg-[#0b1014]/60" />
         <Radix.Content
+          onOpenAutoFocus={begin}
+          onCloseAutoFocus={end}
           {...(description ? {} : { "aria-describedby": undefined })}
           className="fixed inset-x-0 bottom-0 z-50 flex max-h-[90dvh] flex-col rounded-t border border-edge bg-paper-raised text-ink shadow-lifted sm:inset-x-auto sm:top-1/2 sm:bottom-auto sm:left-1/2 sm:w-[min(34rem,calc(100vw-2rem))] sm:-translate-1/2 sm:rounded"
         >

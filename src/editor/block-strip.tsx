@@ -23,16 +23,18 @@ export function BlockStrip({ what, children, move, remove }: BlockStripProps) {
       >
         <GripVertical aria-hidden="true" className="size-4" />
       </span>
-      <div className="flex min-w-0 flex-1 flex-wrap items-center gap-1">{children}</div>
-      <StripButton label={`Move the ${what} up`} onClick={() => move("up")}>
-        <ArrowUp aria-hidden="true" className="size-5" />
-      </StripButton>
-      <StripButton label={`Move the ${what} down`} onClick={() => move("down")}>
-        <ArrowDown aria-hidden="true" className="size-5" />
-      </StripButton>
-      <StripButton label={`Take the ${what} out`} onClick={remove}>
-        <Trash aria-hidden="true" className="size-5" />
-      </StripButton>
+      <div className="flex flex-auto flex-wrap items-center gap-1">{children}</div>
+      <div className="ml-auto flex">
+        <StripButton label={`Move the ${what} up`} onClick={() => move("up")}>
+          <ArrowUp aria-hidden="true" className="size-5" />
+        </StripButton>
+        <StripButton label={`Move the ${what} down`} onClick={() => move("down")}>
+          <ArrowDown aria-hidden="true" className="size-5" />
+        </StripButton>
+        <StripButton label={`Take the ${what} out`} onClick={remove}>
+          <Trash aria-hidden="true" className="size-5" />
+        </StripButton>
+      </div>
     </div>
   );
 }

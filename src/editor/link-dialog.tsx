@@ -4,7 +4,6 @@ import { isAllowedHref } from "#shared/document/href.ts";
 import { Button } from "#src/components/button.tsx";
 import { Dialog } from "#src/components/dialog.tsx";
 import { TextField } from "#src/components/text-field.tsx";
-import { focusHere } from "#src/lib/focus-here.ts";
 
 interface LinkDialogProps {
   editor: Editor;
@@ -54,7 +53,7 @@ export function LinkDialog({ editor, onClose }: LinkDialogProps) {
       <form id={formId} onSubmit={submit} noValidate className="flex flex-col gap-4">
         <TextField
           label="Address"
-          ref={focusHere}
+          data-focus-first=""
           value={href}
           error={error}
           inputMode="url"

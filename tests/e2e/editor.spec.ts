@@ -120,8 +120,13 @@ test("Escape leads from the text to the tools and back, and arrows from tool to 
   await expect(text(page)).toBeFocused();
   await expect(text(page).locator("strong")).toHaveText("rivet");
   await expect(page.getByRole("button", { name: "Bold" })).toHaveAttribute("aria-pressed", "true");
-  await page.keyboard.press("Control+Slash");
-  await expect(page.getByRole("dialog", { name: "Keyboard shortcuts" })).toBeVisible();
+  for (const keys of ["Control+KeyK", "Control+Slash"]) {
+    await page.keyboard.press(keys);
+    await expect(page.getByRole("dialog")).toBeVisible();
+    await page.keyboard.press("Escape");
+    await expect(page.getByRole("dialog")).toHaveCount(0);
+    await expect(text(page)).toBeFocused();
+  }
 });
 
 test("a link is refused beside its field until it leads somewhere allowed", async ({ page, baseURL }) => {

@@ -1,6 +1,5 @@
 import { calculators } from "#shared/calculators/registry.ts";
 import { Dialog } from "#src/components/dialog.tsx";
-import { focusHere } from "#src/lib/focus-here.ts";
 
 interface CalculatorDialogProps {
   onClose(): void;
@@ -21,7 +20,7 @@ export function CalculatorDialog({ onClose, onChoose }: CalculatorDialogProps) {
           <li key={id}>
             <button
               type="button"
-              ref={index === 0 ? focusHere : undefined}
+              data-focus-first={index === 0 ? "" : undefined}
               onClick={() => onChoose({ calculator: id, title: "", inputs: { ...example } })}
               className="w-full cursor-pointer rounded border border-edge bg-paper px-4 py-3 text-left hover:bg-temper-wash"
             >

@@ -2,7 +2,6 @@ import { type FormEvent, useId, useState } from "react";
 import { Button } from "#src/components/button.tsx";
 import { Dialog } from "#src/components/dialog.tsx";
 import { TextField } from "#src/components/text-field.tsx";
-import { focusHere } from "#src/lib/focus-here.ts";
 import { localFieldValue, momentInWords, momentOfField } from "../moments.ts";
 
 interface ScheduleDialogProps {
@@ -51,7 +50,7 @@ export function ScheduleDialog({ scheduledAt, error, busy, onSchedule, onClose }
       <form id={formId} onSubmit={submit} noValidate>
         <TextField
           type="datetime-local"
-          ref={focusHere}
+          data-focus-first=""
           label="Date and time"
           help={`In your own time (${zone}).`}
           value={value}

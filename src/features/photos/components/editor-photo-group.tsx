@@ -9,7 +9,7 @@ export function EditorPhotoGroup({ count, move, remove, dissolve, children }: Ph
       <BlockStrip what="row of photos" move={move} remove={remove}>
         <span className="px-2 text-xs font-semibold text-ink-soft">{count} photos side by side</span>
         <Button tone="quiet" onClick={dissolve}>
-          Set them one under the other
+          Set one under the other
         </Button>
       </BlockStrip>
       {children}

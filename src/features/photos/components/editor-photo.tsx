@@ -28,7 +28,7 @@ export function EditorPhoto(props: PhotoViewProps) {
         </StripButton>
         {inGroup ? (
           <Button tone="quiet" onClick={takeOut}>
-            Take out of the row
+            Set alone
           </Button>
         ) : null}
         {joinAbove ? (
