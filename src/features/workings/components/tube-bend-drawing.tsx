@@ -49,7 +49,7 @@ export function TubeBendDrawing({ inputs, results, units }: DrawingProps<TubeBen
             .map((point) => (
               <Tick key={point.join(" ")} spot={place(point)} />
             ))}
-          {placedWords(words, [], size).map(({ at: spot, text, soft }) => (
+          {placedWords(words, [...spots, ...spots.toReversed()], size).map(({ at: spot, text, soft }) => (
             <Figure key={text} at={spot} anchor="middle" soft={soft}>
               {text}
             </Figure>

@@ -19,6 +19,12 @@ import {
 
 const size = { width: 360, height: 440 };
 
+/** Where the words of the jig's heights begin: no other word reaches past it. */
+const jigEdge: readonly Spot[] = [
+  [264, 0],
+  [264, size.height],
+];
+
 interface FrontViewProps {
   inputs: WishboneTravelInputs;
   results: WishboneTravelResults;
@@ -86,7 +92,7 @@ export function WishboneFrontView({ inputs, results, show, unit }: FrontViewProp
           show={show}
         />
       )}
-      {centreWords(seen, near, at).map(({ at: spot, text }) => (
+      {centreWords(seen, near, at, table !== undefined).map(({ at: spot, text }) => (
         <Figure key={text} at={spot} anchor="middle">
           {text}
         </Figure>
@@ -124,13 +130,13 @@ function centresTold(
   return `${roll} ${instant}`;
 }
 
-function centreWords(roll: Spot | null, instant: InstantCentre | null, at: Place): Word[] {
+function centreWords(roll: Spot | null, instant: InstantCentre | null, at: Place, jigged: boolean): Word[] {
   const words: Word[] = [];
-  if (roll) words.push({ at: at(...roll), out: [1, 0], text: "roll centre", soft: false });
+  if (roll) words.push({ at: at(...roll), out: [0.8, -0.6], text: "roll centre", soft: false });
   if (instant) {
-    words.push({ at: at(instant.out, instant.up), out: [0, 1], text: "instant centre", soft: false });
+    words.push({ at: at(instant.out, instant.up), out: [1, 0], text: "instant centre", soft: false });
   }
-  return placedWords(words, [], size);
+  return placedWords(words, jigged ? jigEdge : [], size);
 }
 
 function Mark({ spot: [x, y] }: { spot: Spot }) {

@@ -74,6 +74,7 @@ const settings: Record<string, object[]> = {
     { ...corner, upperFront: [156, 283, 416], upperRear: [-34, 283, 416], tableUp: -300 },
     { ...corner, upperFront: [156, 283, 300], upperRear: [-34, 283, 300], tableUp: 172, step: 1 },
     { ...corner, camber: 15, toe: -10, bump: 90, rebound: 70 },
+    { ...corner, upperFront: [156, 283, 330], upperRear: [-34, 283, 330], rodInner: [96, 230, 214] },
   ],
   "stock-cutting": [
     { pieces: [{ length: 5, count: 100 }], stock: [{ length: 600 }], kerf: 0 },
