@@ -26,7 +26,7 @@ export function TubeBendDrawing({ inputs, results, units }: DrawingProps<TubeBen
   const words = [
     ...bends.map((bend, index) => ({
       at: place(onArc(bend, 0.5)),
-      out: outward(place(bend.corner), place(onArc(bend, 0.5))),
+      out: outward(place(bend.start), place(bend.end), place(onArc(bend, 0.5))),
       text: bends.length <= named ? `${index + 1}: ${bend.angle.toFixed(1)}°` : `${index + 1}`,
       soft: false,
     })),
@@ -78,11 +78,13 @@ function isometric([x, y, z]: Vector): Spot {
   return [(x - y) * Math.cos(Math.PI / 6), z + (x + y) / 2];
 }
 
-/** Unit direction from the bend towards its corner, y upward; up where the two fall together. */
-function outward([cornerX, cornerY]: Spot, [x, y]: Spot): Spot {
-  const [dx, dy] = [cornerX - x, y - cornerY];
-  const length = Math.hypot(dx, dy);
-  return length < 0.01 ? [0, 1] : [dx / length, dy / length];
+/** Unit direction from the bend away from its two ends, y upward; square to the line where it is seen edge-on. */
+function outward(start: Spot, end: Spot, [x, y]: Spot): Spot {
+  const [dx, dy] = [x - (start[0] + end[0]) / 2, (start[1] + end[1]) / 2 - y];
+  const [along, up] = [end[0] - start[0], start[1] - end[1]];
+  const chord = Math.hypot(along, up) || 1;
+  const away = Math.hypot(dx, dy);
+  return away < 0.05 * chord ? [up / chord, -along / chord] : [dx / away, dy / away];
 }
 
 /** Where a bend begins or ends. */

@@ -237,4 +237,24 @@ describe("drawings", () => {
     const ratio = (Math.max(...xs) - Math.min(...xs)) / (Math.max(...ys) - Math.min(...ys));
     expect(ratio).toBeCloseTo(2, 3);
   });
+
+  it("numbers every bend of a tube, one seen edge-on too", () => {
+    const [sheet] = drawn(
+      drawingMarkup("tube-bend", {
+        points: [
+          [0, 0, 0],
+          [0, 0, 700],
+          [200, 150, 1000],
+          [900, 150, 1000],
+          [1100, 0, 700],
+          [1100, 0, 0],
+        ],
+        bendRadius: 120,
+        od: 38,
+        wall: 2,
+      }),
+    );
+    const numbers = sheet?.words.map(({ text }) => text.split(":")[0]);
+    expect(numbers).toEqual(expect.arrayContaining(["1", "2", "3", "4"]));
+  });
 });
