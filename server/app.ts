@@ -97,13 +97,16 @@ export function createApp({ config, database, log, clock, client }: AppParts) {
 
 const yearSeconds = 365 * 24 * 3600;
 
-/** Built files carry a hash of their content in their name; those of public/ do not. */
+/**
+ * Built files carry a hash of their content in their name; those of public/ do not. Both folders are listed
+ * once at the start: asking the disk for every page's address would cost more than sending the page.
+ */
 function serveStaticFiles(app: Express): void {
   const assets = "dist/client/assets";
   if (existsSync(assets)) {
     app.use("/assets", sirv(assets, { immutable: true, maxAge: yearSeconds, brotli: true, gzip: true }));
   }
-  app.use(express.static("public", { maxAge: "1h", index: false }));
+  app.use(sirv("public", { maxAge: 3600, etag: true }));
 }
 
 function readSiteVersion(database: Database): number {

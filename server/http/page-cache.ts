@@ -1,9 +1,9 @@
 import type { PageSettings } from "#shared/contracts/rendering.ts";
 
-/** A page ready to send but for its nonce. */
+/** A page ready to send but for its nonce, which belongs between the pieces. */
 export interface FinishedPage {
   status: number;
-  html: string;
+  pieces: Buffer[];
 }
 
 /** Finished pages for signed-out readers, good until anything public changes. */

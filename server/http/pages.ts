@@ -51,7 +51,7 @@ async function drawOrTell(
     return await draw(req, res, settings, options);
   } catch (thrown) {
     const { status, body } = toErrorResponse(thrown, options.log);
-    return { status, html: faultPage(body.error.message, body.error.id) };
+    return finished(status, faultPage(body.error.message, body.error.id));
   }
 }
 
@@ -77,7 +77,7 @@ async function draw(
     return null;
   }
   const template = await options.client.template(req.originalUrl);
-  return { status: page.status, html: fill(template, page, settings, options.client) };
+  return finished(page.status, fill(template, page, settings, options.client));
 }
 
 /** Puts the drawn page into the template. Function replacers, as a `$` in the text means nothing then. */
@@ -99,9 +99,21 @@ function fill(
     .replace("<!--state-->", () => state);
 }
 
+/** Cut at the nonces and encoded once, as a kept page is sent many times. */
+function finished(status: number, html: string): FinishedPage {
+  return { status, pieces: html.split(noncePlaceholder).map((piece) => Buffer.from(piece)) };
+}
+
+function withNonce(pieces: Buffer[], nonce: string): Buffer {
+  const between = Buffer.from(nonce);
+  return Buffer.concat(pieces.flatMap((piece, index) => (index === 0 ? [piece] : [between, piece])));
+}
+
 function send(res: Response, page: FinishedPage, viewer: Viewer): void {
   res.status(page.status);
   res.set("Content-Type", "text/html; charset=utf-8");
   res.set("Cache-Control", viewer ? "private, no-store" : "private, no-cache");
-  res.end(page.html.replaceAll(noncePlaceholder, res.locals.nonce));
+  const body = withNonce(page.pieces, res.locals.nonce);
+  res.set("Content-Length", String(body.length));
+  res.end(body);
 }

@@ -1,7 +1,7 @@
 import { describe, expect, it } from "vitest";
 import { createPageCache } from "#server/http/page-cache.ts";
 
-const page = (html: string) => ({ status: 200, html });
+const page = (html: string) => ({ status: 200, pieces: [Buffer.from(html)] });
 
 function setUp(most?: number) {
   const state = { version: 1, now: 0 };
