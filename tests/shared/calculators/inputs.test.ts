@@ -1,6 +1,13 @@
 import { describe, expect, it } from "vitest";
 import { z } from "zod";
-import { choiceInput, countInput, describeInputs, numberInput } from "#shared/calculators/inputs.ts";
+import {
+  choiceInput,
+  countInput,
+  describeInputs,
+  numberInput,
+  pointInput,
+  textInput,
+} from "#shared/calculators/inputs.ts";
 import { calculators } from "#shared/calculators/registry.ts";
 
 const wall = numberInput({
@@ -54,6 +61,39 @@ describe("describeInputs", () => {
     ]);
     expect(fields[2]).toMatchObject({ fields: [{ name: "wall", kind: "number" }] });
     expect(fields[3]).toMatchObject({ item: { kind: "number", max: 9 } });
+  });
+
+  it("describes a point by its axes, words by their length, and one-or-a-list as the list", () => {
+    const joint = pointInput({
+      label: "Joint",
+      help: "",
+      axes: ["fore", "out", "up"],
+      min: -9,
+      max: 9,
+      step: 1,
+    });
+    const fields = describeInputs(
+      z.object({
+        joint,
+        mark: textInput({ label: "Mark", help: "", maxLength: 3 }),
+        radius: z.union([wall, z.array(wall)]).meta({ label: "Radius", help: "" }),
+      }),
+    );
+    expect(fields).toMatchObject([
+      {
+        name: "joint",
+        kind: "point",
+        axes: [{ label: "Joint, fore", unit: "mm" }, {}, { label: "Joint, up" }],
+      },
+      { name: "mark", kind: "text", maxLength: 3 },
+      { name: "radius", kind: "list", label: "Radius", item: { kind: "number", max: 9 } },
+    ]);
+    expect(joint.safeParse([1, 2]).error?.issues[0]?.message).toBe(
+      "Give joint as three numbers in mm: fore, out, up.",
+    );
+    expect(joint.safeParse([1, 2, 10]).error?.issues[0]?.message).toBe(
+      "Joint, up must be between -9 and 9 mm.",
+    );
   });
 
   it("refuses a field without words", () => {
