@@ -2,12 +2,12 @@ import { defineCalculator } from "../definition.ts";
 import { bolt as compute } from "./formula.ts";
 import { boltInputs } from "./inputs.ts";
 
-/** One steel bolt: what it holds and how hard to tighten it. */
+/** One steel bolt: what it resists and how hard to tighten it. */
 export const bolt = defineCalculator({
   id: "bolt",
   version: 1,
   name: "Bolt",
-  purpose: "Reckon what one steel bolt holds in pull and in shear, and the torque that tightens it.",
+  purpose: "Reckon what one steel bolt resists in pull and in shear, and the torque that tightens it.",
   group: "Threads and bolts",
   words: [
     "bolt",

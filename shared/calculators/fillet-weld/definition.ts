@@ -7,7 +7,7 @@ export const filletWeld = defineCalculator({
   id: "fillet-weld",
   version: 1,
   name: "Fillet weld",
-  purpose: "Reckon what a fillet weld of this size and length holds.",
+  purpose: "Reckon what a fillet weld of this size and length resists.",
   group: "Strength",
   words: ["weld", "fillet", "throat", "leg", "weld strength", "weld size"],
   inputs: filletWeldInputs,
